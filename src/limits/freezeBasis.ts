@@ -1,0 +1,33 @@
+import type { Basis, BasisHow, BasisStep, Mark } from "../basis.js";
+import { LimitsError } from "../errors.js";
+import { ownValue } from "../ownValue.js";
+
+const HOWS: readonly BasisHow[] = ["tabulated", "derived", "common practice", "caller"];
+
+/** Copies a caller's basis into a frozen one, checked field by field. */
+export function freezeBasis(steps: readonly BasisStep[]): Basis {
+  if (Object.isFrozen(steps) && steps.every((step) => Object.isFrozen(step))) return steps;
+  return Object.freeze(steps.map(freezeStep));
+}
+
+function freezeStep(step: BasisStep, index: number): BasisStep {
+  const standard: unknown = ownValue(step, "standard");
+  const place: unknown = ownValue(step, "place");
+  const says: unknown = ownValue(step, "says");
+  const how = ownValue(step, "how");
+  const mark: Mark | undefined = ownValue(step, "mark");
+  if (
+    typeof standard !== "string" ||
+    typeof place !== "string" ||
+    typeof says !== "string" ||
+    how === undefined ||
+    !HOWS.includes(how)
+  ) {
+    throw new LimitsError("LIMITS_INVALID", "a step of the basis needs standard, place, says and how", {
+      value: step,
+      allowed: `how: ${HOWS.join(", ")}`,
+      path: ["basis", index],
+    });
+  }
+  return Object.freeze(mark === undefined ? { standard, place, says, how } : { standard, place, says, how, mark });
+}

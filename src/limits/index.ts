@@ -1,0 +1,16 @@
+export { asLimits } from "./asLimits.js";
+export { fitOf } from "./fitOf.js";
+export type { FitOptions } from "./fitOf.js";
+export type { Fit, FitKind, FitSystem } from "./fitValue.js";
+export { limits } from "./limits.js";
+export type { LimitsParts } from "./limits.js";
+export { limitsFromMaxMin } from "./limitsFromMaxMin.js";
+export type { MaxMin } from "./limitsFromMaxMin.js";
+export type { Limits, LimitsLike, SingleLimit } from "./limitsValue.js";
+export { makeFit } from "./makeFit.js";
+export { makeLimits } from "./makeLimits.js";
+export { oneSidedLimits } from "./oneSidedLimits.js";
+export { singleLimit } from "./singleLimit.js";
+export { symmetricLimits } from "./symmetricLimits.js";
+export { writeLimits } from "./writeLimits.js";
+export type { LimitsForm, LimitsRounding, WriteLimitsStyle, WrittenLimits } from "./writeLimits.js";
