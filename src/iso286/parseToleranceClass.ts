@@ -9,7 +9,7 @@ export type ToleranceClassLike = string | ToleranceClass;
 const known: Map<string, ToleranceClass> = new Map<string, ToleranceClass>();
 const gradeNames: ReadonlySet<string> = new Set(GRADES);
 const letters: ReadonlySet<string> = new Set([...SHAFT_LETTERS, ...SHAFT_LETTERS.map((letter) => letter.toUpperCase())]);
-const CLASS = /^([A-Za-z]{1,2})(\d{1,2})$/;
+const CLASS = /^([a-z]{1,2})(\d{1,2})$/i;
 
 /**
  * Takes a tolerance class apart; the case of its letter decides between hole and shaft.

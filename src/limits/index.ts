@@ -1,3 +1,5 @@
+export { angleLimits } from "./angleLimits.js";
+export type { AngleLimits, AngleLimitsParts } from "./angleLimits.js";
 export { asLimits } from "./asLimits.js";
 export { fitOf } from "./fitOf.js";
 export type { FitOptions } from "./fitOf.js";
@@ -10,6 +12,8 @@ export type { Limits, LimitsLike, SingleLimit } from "./limitsValue.js";
 export { makeFit } from "./makeFit.js";
 export { makeLimits } from "./makeLimits.js";
 export { oneSidedLimits } from "./oneSidedLimits.js";
+export { rankFits } from "./rankFits.js";
+export type { FitCandidate, WantedClearance } from "./rankFits.js";
 export { singleLimit } from "./singleLimit.js";
 export { symmetricLimits } from "./symmetricLimits.js";
 export { writeLimits } from "./writeLimits.js";

@@ -49,8 +49,22 @@ class AngleValue implements Angle {
   }
 }
 
-/** Makes an angle from millionths of an arc second; the one place where an {@link Angle} comes into being. */
-export function angleOf(microarcseconds: number, style: AngleStyle): Angle {
+/**
+ * Makes an angle from whole millionths of an arc second.
+ *
+ * @param microarcseconds - a whole number, safe in a double; one degree is 3 600 000 000
+ * @param style - `"decimal"` or `"dms"`: how to show it, in degrees
+ * @returns the angle; every {@link Angle} comes into being here
+ * @throws `ANGLE_OUT_OF_RANGE` for what is not a safe whole number
+ * @example
+ * ```ts
+ * import { angleOfMicroarcseconds } from "limitsmith";
+ *
+ * angleOfMicroarcseconds(1_800_000_000, "dms").toString(); // → "0°30'"
+ * ```
+ * @reference 1° = 60' = 3600": ISO 80000-3:2019, table 2
+ */
+export function angleOfMicroarcseconds(microarcseconds: number, style: AngleStyle): Angle {
   if (!Number.isSafeInteger(microarcseconds)) {
     throw new LimitsError("ANGLE_OUT_OF_RANGE", "the angle is beyond what can be held exactly", {
       value: microarcseconds,

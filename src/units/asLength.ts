@@ -1,3 +1,4 @@
+import { atPath } from "../located.js";
 import { LimitsError } from "../errors.js";
 import { isMadeLength, lengthOfTicks } from "./length.js";
 import type { Length, LengthLike } from "./length.js";
@@ -27,7 +28,7 @@ const { hasOwn } = Object;
  * @reference none: a convenience of this library
  */
 export function asLength(value: LengthLike, path: readonly (string | number)[] = []): Length {
-  if (typeof value === "string") return readLength(value);
+  if (typeof value === "string") return atPath(path, () => readLength(value));
   // the type says it cannot be anything else; what arrives from JavaScript can
   const given: unknown = value;
   if (typeof given !== "object" || given === null || !hasOwn(given, "ticks") || !hasOwn(given, "unit")) {
@@ -41,6 +42,6 @@ export function asLength(value: LengthLike, path: readonly (string | number)[] =
   if (!Number.isSafeInteger(value.ticks)) {
     throw new LimitsError("LENGTH_INVALID", "the ticks of a length are a whole number", { value: value.ticks, path });
   }
-  ticksPerUnit(value.unit);
+  atPath(path, () => ticksPerUnit(value.unit));
   return lengthOfTicks(value.ticks, value.unit);
 }

@@ -1,5 +1,5 @@
 import { LimitsError } from "../errors.js";
-import { angleOf } from "./angle.js";
+import { angleOfMicroarcseconds } from "./angle.js";
 import type { Angle } from "./angle.js";
 
 /**
@@ -25,5 +25,5 @@ export function degrees(value: number): Angle {
     throw new LimitsError("NUMBER_NOT_FINITE", "an angle must be a finite number", { value: given });
   }
   const magnitude = Math.round(Math.abs(given) * 3_600_000_000);
-  return angleOf(given < 0 ? -magnitude : magnitude, "decimal");
+  return angleOfMicroarcseconds(given < 0 ? -magnitude : magnitude, "decimal");
 }

@@ -1,4 +1,5 @@
 export { add } from "./add.js";
+export { angleOfMicroarcseconds } from "./angle.js";
 export type { Angle, AngleData, AngleLike, AngleStyle } from "./angle.js";
 export { asLength } from "./asLength.js";
 export { compareLengths } from "./compareLengths.js";
@@ -15,7 +16,7 @@ export { multiply } from "./multiply.js";
 export type { Ratio } from "./multiply.js";
 export { readAngle } from "./readAngle.js";
 export { readDimension } from "./readDimension.js";
-export type { ReadDimensionOptions, WrittenDimension } from "./readDimension.js";
+export type { ReadDimensionOptions, WrittenDimension, WrittenDimensionLike } from "./readDimension.js";
 export { readLength } from "./readLength.js";
 export type { DecimalMark } from "./readNumber.js";
 export { roundLength } from "./roundLength.js";

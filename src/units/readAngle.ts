@@ -1,6 +1,6 @@
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
-import { angleOf } from "./angle.js";
+import { angleOfMicroarcseconds } from "./angle.js";
 import type { Angle, AngleLike } from "./angle.js";
 import { decimalMarkOf } from "./lengthFrom.js";
 import type { ReadOptions } from "./lengthFrom.js";
@@ -53,7 +53,7 @@ export function readAngle(text: AngleLike, options?: ReadOptions): Angle {
     Number(scaledDegrees / scale) +
     Number(minutes ?? 0) * 60_000_000 +
     Number((seconds ?? "0") + fraction.padEnd(6, "0"));
-  return angleOf(sign === "-" || sign === "\u2212" ? -magnitude : magnitude, divided ? "dms" : "decimal");
+  return angleOfMicroarcseconds(sign === "-" || sign === "\u2212" ? -magnitude : magnitude, divided ? "dms" : "decimal");
 }
 
 function angleOfData(given: object): Angle {
@@ -61,7 +61,7 @@ function angleOfData(given: object): Angle {
   const microarcseconds = ownValue(data, "microarcseconds");
   const style = ownValue(data, "style");
   if (typeof microarcseconds !== "number" || (style !== "decimal" && style !== "dms")) throw notAnAngle(given);
-  return angleOf(microarcseconds, style);
+  return angleOfMicroarcseconds(microarcseconds, style);
 }
 
 function notAnAngle(value: unknown): LimitsError {

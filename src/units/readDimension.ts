@@ -1,6 +1,6 @@
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
-import type { Length, LengthUnit } from "./length.js";
+import type { Length, LengthLike, LengthUnit } from "./length.js";
 import { decimalMarkOf, lengthOfNumber } from "./lengthFrom.js";
 import type { ReadOptions } from "./lengthFrom.js";
 import { readNumber } from "./readNumber.js";
@@ -17,6 +17,9 @@ export interface WrittenDimension {
   /** True where the unit stood in the text itself. */
   readonly unitWritten: boolean;
 }
+
+/** The same, where its length may have travelled through JSON. */
+export type WrittenDimensionLike = Omit<WrittenDimension, "length"> & { readonly length: LengthLike };
 
 /** Options of {@link readDimension}. */
 export interface ReadDimensionOptions extends ReadOptions {

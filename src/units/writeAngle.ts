@@ -1,6 +1,6 @@
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
-import { angleOf } from "./angle.js";
+import { angleOfMicroarcseconds } from "./angle.js";
 import type { AngleLike, AngleStyle } from "./angle.js";
 import { readAngle } from "./readAngle.js";
 
@@ -32,5 +32,5 @@ export function writeAngle(angle: AngleLike, options?: WriteAngleOptions): strin
   if (style !== "decimal" && style !== "dms") {
     throw new LimitsError("OPTION_INVALID", "not a style of angle", { value: style, allowed: "decimal, dms" });
   }
-  return angleOf(value.microarcseconds, style).toString();
+  return angleOfMicroarcseconds(value.microarcseconds, style).toString();
 }

@@ -1,0 +1,2 @@
+export { sheetJsonSchema, sheetSchema } from "../sheet/index.js";
+export type { FeatureSpec, SheetSpec, TitleBlockFields } from "../sheet/index.js";
