@@ -3,7 +3,9 @@ const { hasOwn } = Object;
 
 /**
  * Reads an option or a field by own key only, so that a polluted `Object.prototype` cannot supply one.
+ * What is no object has no options: callers without types may hand over anything.
  */
 export function ownValue<T extends object, K extends keyof T>(from: T | undefined, key: K): T[K] | undefined {
-  return from !== undefined && hasOwn(from, key) ? from[key] : undefined;
+  const given: unknown = from;
+  return typeof given === "object" && given !== null && hasOwn(given, key) ? from?.[key] : undefined;
 }

@@ -154,13 +154,12 @@ function twoDeviationsForm(
   const start = next.start;
   const first = signedSize(reader, nominal, options);
   reader.takeIf("/");
-  const end = reader.peek()?.end ?? reader.text.length;
   const second = signedSize(reader, nominal, options);
   if (compareLengths(first, second) < 0) {
     throw new LimitsError("LIMITS_UPSIDE_DOWN", "the upper deviation stands first and is the larger one", {
       value: reader.text,
       allowed: "upper deviation, then lower deviation",
-      position: { start, end },
+      position: { start, end: reader.takenTo },
     });
   }
   return { kind: "deviations", nominal, upper: first, lower: second, form: "two" };

@@ -5,7 +5,7 @@ import type { AngleLimits, Fit, Limits, SingleLimit } from "../limits/index.js";
 import { ownValue } from "../ownValue.js";
 import { defaultLimits } from "../titleBlock/index.js";
 import type { TitleBlock, TitleBlockSpec } from "../titleBlock/index.js";
-import { readAngle } from "../units/index.js";
+import { asRequest } from "./asRequest.js";
 import { readCallout } from "./readCallout.js";
 import type { CalloutOptions } from "./readSize.js";
 import type { CalloutRequest } from "./request.js";
@@ -58,7 +58,7 @@ export function resolveCallout(callout: string | CalloutRequest, context: Callou
           ...(unit === undefined ? {} : { unit }),
           ...(decimalMark === undefined ? {} : { decimalMark }),
         })
-      : callout;
+      : asRequest(callout);
   return Object.freeze(resolve(request, ownValue(context, "feature"), block));
 }
 
@@ -88,15 +88,11 @@ function resolve(
     case "plain":
       return asOutcome(request, defaultLimits(needBlock(block, request.text), request.nominal).limits);
     case "angle":
-      return { outcome: "angle", request, angle: defaultLimits(needBlock(block, request.text), readAngle(request.angle)).limits };
+      return { outcome: "angle", request, angle: defaultLimits(needBlock(block, request.text), request.angle).limits };
     case "reference":
       return { outcome: "no limits", request, reason: "a reference dimension is for information only" };
     case "basic":
       return { outcome: "no limits", request, reason: "a basic dimension is theoretically exact; its tolerance stands in a frame" };
-    default:
-      throw new LimitsError("CALLOUT_NOT_UNDERSTOOD", "not a request that is known here", {
-        value: (request as { readonly kind?: unknown }).kind,
-      });
   }
 }
 

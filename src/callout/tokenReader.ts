@@ -35,6 +35,11 @@ export class TokenReader {
     return token;
   }
 
+  /** Where the last token that was taken ends. */
+  get takenTo(): number {
+    return this.peek(-1)?.end ?? 0;
+  }
+
   get done(): boolean {
     return this.#next >= this.#tokens.length;
   }

@@ -6,7 +6,7 @@ import { markOf } from "./markOf.js";
 import { stepText } from "./sizeStep.js";
 import type { SizeStep } from "./sizeStep.js";
 import { DELTAS_UM } from "./tables/deltas.js";
-import { HOLES_J, M6_OVER_250_TO_315_UM } from "./tables/holesAToM.js";
+import { HOLES_J, K_OVER_400_TO_500_MARK, M6_OVER_250_TO_315_MARK, M6_OVER_250_TO_315_UM } from "./tables/holesAToM.js";
 import { SHAFTS_A_TO_H, SHAFTS_J } from "./tables/shaftsAToJ.js";
 import { SHAFTS_K_TO_ZC } from "./tables/shaftsKToZc.js";
 import { INTERMEDIATE_STEP_ENDS_MM, MAIN_STEP_ENDS_MM } from "./tables/sizeSteps.js";
@@ -33,6 +33,7 @@ const ofJ: ReadonlyMap<string, DeviationColumn> = new Map(
 const FIRST_DELTA_STEP = 1;
 const LAST_DELTA_STEP = 12;
 const STEP_250_TO_315 = 10;
+const STEP_400_TO_500 = LAST_DELTA_STEP;
 // main steps to 10 mm: all that the 1988 edition gives for cd, ef and fg
 const STEPS_TO_10_MM = 3;
 
@@ -67,7 +68,7 @@ function toHDeviation(cls: ToleranceClass, column: DeviationColumn, step: SizeSt
   const place = `Table ${cls.kind === "shaft" ? 4 : 2}, ${stepText(step, column.steps)}`;
   return cls.kind === "shaft"
     ? tabulated("upper", um, place, `${cls.letter}: es = ${signed(um)} µm`, mark)
-    : tabulated("lower", -um, place, `${cls.letter}: EI = ${signed(-um)} µm`, mark);
+    : tabulated("lower", mirror(um), place, `${cls.letter}: EI = ${signed(mirror(um))} µm`, mark);
 }
 
 /** js and JS lie evenly about the nominal: ±IT/2. */
@@ -119,19 +120,20 @@ function shaftFromK(cls: ToleranceClass, step: SizeStep): Fundamental {
 /** K to ZC give ES: the mirrored shaft value, with delta in the finer grades over 3 up to 500 mm. */
 function holeFromK(cls: ToleranceClass, step: SizeStep): Fundamental {
   const column = columnFromK(cls);
-  const { um, mark } = columnValue(cls, column, step);
+  const { um, mark: shaftMark } = columnValue(cls, column, step);
   const grade = gradeNumber(cls.grade);
   const { letter } = cls;
+  const mark = letter === "K" && step.main === STEP_400_TO_500 ? K_OVER_400_TO_500_MARK : shaftMark;
   const early = letter === "K" || letter === "M" || letter === "N";
   const place = `Table ${letter === "K" || letter === "M" ? 2 : 3}, ${stepText(step, column.steps)}`;
-  const mirrored = (es: number): Fundamental =>
-    tabulated("upper", es, place, `${cls.text}: ES = ${signed(es)} µm`, mark);
+  const mirrored = (es: number, sure = mark): Fundamental =>
+    tabulated("upper", es, place, `${cls.text}: ES = ${signed(es)} µm`, sure);
 
   if (step.main < FIRST_DELTA_STEP || step.main > LAST_DELTA_STEP) {
     if (letter === "N" && step.tiny && grade > 8) {
       throw notDefined(cls, step, "is not defined in grades above IT8 up to 1 mm", "N to IT8 up to 1 mm");
     }
-    return mirrored(-um);
+    return mirrored(mirror(um));
   }
   if (grade < 3) {
     throw new LimitsError("ISO_CLASS_NOT_DEFINED", `${cls.text} is not defined over 3 up to 500 mm`, {
@@ -143,10 +145,12 @@ function holeFromK(cls: ToleranceClass, step: SizeStep): Fundamental {
     if (letter === "K") {
       throw notDefined(cls, step, "is not defined in grades above IT8 over 3 up to 500 mm", "K3 to K8 there");
     }
-    return mirrored(letter === "N" ? 0 : -um);
+    return mirrored(letter === "N" ? 0 : mirror(um));
   }
-  if (cls.text === "M6" && step.main === STEP_250_TO_315) return mirrored(M6_OVER_250_TO_315_UM);
-  return withDelta(cls, -um, deltaOf(grade, step), place, mark);
+  if (cls.text === "M6" && step.main === STEP_250_TO_315) {
+    return mirrored(M6_OVER_250_TO_315_UM, M6_OVER_250_TO_315_MARK);
+  }
+  return withDelta(cls, mirror(um), deltaOf(grade, step), place, mark);
 }
 
 function deltaOf(grade: number, step: SizeStep): number {
@@ -213,6 +217,11 @@ function notDefined(cls: ToleranceClass, step: SizeStep, why: string, allowed: s
     value: `${cls.text}, ${where}`,
     allowed,
   });
+}
+
+/** The value of the other side of the zero line; never a negative zero. */
+function mirror(um: number): number {
+  return 0 - um;
 }
 
 function signed(um: number): string {

@@ -78,7 +78,7 @@ export function isoClassesFor(limits: LimitsLike, options?: ClassesForOptions): 
   const sizeGiven = ownValue(options, "size");
   const size = sizeGiven === undefined ? given.nominal : asLength(sizeGiven, ["size"]);
   const stepIndex = stepIndexOf(size.ticks);
-  const printed = ownValue(options, "printed");
+  const printed = printedOf(ownValue(options, "printed"));
   const preferred = new Set(preferredIsoClasses().map((one) => one.text));
   const standing = (cls: ToleranceClass): number =>
     preferred.has(cls.text) ? 0 : isInPrintedSpan(cls, stepAt(stepIndex)) ? 1 : 2;
@@ -96,6 +96,17 @@ export function isoClassesFor(limits: LimitsLike, options?: ClassesForOptions): 
       matchOrder(left.match) - matchOrder(right.match) || standing(left.toleranceClass) - standing(right.toleranceClass),
   );
   return Object.freeze(found);
+}
+
+function printedOf(given: unknown): PrintedRounding | undefined {
+  if (given === undefined) return undefined;
+  if (typeof given !== "object" || given === null) {
+    throw new LimitsError("OPTION_INVALID", "printed says how the limits were rounded", {
+      value: given,
+      allowed: "{ unit, places }",
+    });
+  }
+  return given as PrintedRounding;
 }
 
 function matchOf(given: Limits, exact: Limits, printed: PrintedRounding | undefined): LimitsMatch | null {

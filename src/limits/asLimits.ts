@@ -1,4 +1,5 @@
 import { LimitsError } from "../errors.js";
+import { atPath } from "../located.js";
 import { ownValue } from "../ownValue.js";
 import { asLength } from "../units/index.js";
 import { limits } from "./limits.js";
@@ -46,13 +47,14 @@ export function asLimits(value: LimitsLike, path: readonly (string | number)[] =
     });
   }
   const basis = ownValue(value, "basis");
-  const made = limits({
-    nominal,
-    upper,
-    lower,
+  const parts = {
+    nominal: asLength(nominal, [...path, "nominal"]),
+    upper: asLength(upper, [...path, "upperDeviation"]),
+    lower: asLength(lower, [...path, "lowerDeviation"]),
     designation: ownValue(value, "designation") ?? null,
     ...(basis === undefined ? {} : { basis }),
-  });
+  };
+  const made = atPath(path, () => limits(parts));
   for (const name of DERIVED) {
     const stated = ownValue(value, name);
     if (stated !== undefined && asLength(stated, [...path, name]).ticks !== made[name].ticks) {

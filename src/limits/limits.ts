@@ -4,6 +4,7 @@ import { ownValue } from "../ownValue.js";
 import { asLength } from "../units/index.js";
 import type { LengthLike } from "../units/index.js";
 import { callerStep } from "./callerStep.js";
+import { designationOf } from "./designationOf.js";
 import { freezeBasis } from "./freezeBasis.js";
 import type { Limits } from "./limitsValue.js";
 import { makeLimits } from "./makeLimits.js";
@@ -51,7 +52,7 @@ export function limits(parts: LimitsParts): Limits {
     upper,
     lower,
     basis === undefined ? callerStep("nominal size and deviations") : freezeBasis(basis),
-    ownValue(parts, "designation") ?? null,
+    designationOf(ownValue(parts, "designation")),
   );
 }
 

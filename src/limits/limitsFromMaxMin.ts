@@ -4,6 +4,7 @@ import { ownValue } from "../ownValue.js";
 import { asLength, subtract } from "../units/index.js";
 import type { LengthLike } from "../units/index.js";
 import { callerStep } from "./callerStep.js";
+import { designationOf } from "./designationOf.js";
 import { freezeBasis } from "./freezeBasis.js";
 import type { Limits } from "./limitsValue.js";
 import { makeLimits } from "./makeLimits.js";
@@ -52,7 +53,7 @@ export function limitsFromMaxMin(sizes: MaxMin): Limits {
     subtract(max, nominal),
     subtract(min, nominal),
     basis === undefined ? callerStep(says) : freezeBasis(basis),
-    ownValue(sizes, "designation") ?? null,
+    designationOf(ownValue(sizes, "designation")),
   );
 }
 

@@ -57,6 +57,7 @@ export interface WrittenLimits {
 interface Style {
   readonly unit: LengthUnit;
   readonly places: number;
+  readonly decimalMark: DecimalMark;
   readonly up: Rounding;
   readonly down: Rounding;
   readonly write: (length: Length, signed?: boolean) => string;
@@ -87,7 +88,7 @@ interface Written {
  * writeLimits(seat, { form: "class" }).text; // → "32 k6 (32.018/32.002)"
  * const inches = writeLimits(seat, { form: "limits", unit: "in", places: 4 });
  * inches.text; // → "1.2605/1.2600"
- * inches.note; // → "rounded inside to 4 decimals of in: max lowered by 55.1 µin, min raised by 78.7 µin"
+ * inches.note; // → "rounded inside to 4 decimals of in: max lowered by 51.2 µin, min raised by 78.7 µin"
  * ```
  * @reference ASME Y14.5-2018, 4.3 and 5.2 (number styles, limit and plus-minus dimensioning), from memory;
  *   ISO 129-1:2018 for metric deviations, from memory
@@ -141,13 +142,14 @@ function writeForm(limits: Limits, form: unknown, style: Style): Written {
 function limitsForm(limits: Limits, style: Style): Written {
   const max = roundLength(limits.max, { unit: style.unit, places: style.places, rounding: style.down });
   const min = roundLength(limits.min, { unit: style.unit, places: style.places, rounding: style.up });
-  const [high, low] = alignDecimals(style.write(max), style.write(min));
+  const [high, low] = alignDecimals(style, style.write(max), style.write(min));
   return { lines: [high, low], text: `${high}/${low}`, max, min };
 }
 
 function deviationsForm(limits: Limits, style: Style): Written {
   const { nominal, upper, lower } = roundedDeviations(limits, style);
   const [high, low] = alignDecimals(
+    style,
     signedZero("+", style.write(upper, true)),
     signedZero("-", style.write(lower, true)),
   );
@@ -203,10 +205,11 @@ function styleOf(limits: Limits, style: WriteLimitsStyle, rounding: LimitsRoundi
   const unit = ownValue(style, "unit") ?? limits.nominal.unit;
   const places = ownValue(style, "places") ?? placesToWrite(limits, unit);
   const numbers = ownValue(style, "numbers");
-  const decimalMark = ownValue(style, "decimalMark");
+  const decimalMark = ownValue(style, "decimalMark") ?? ".";
   return {
     unit,
     places,
+    decimalMark,
     // what brings an upper limit inside brings it down; outside is the reverse
     down: rounding === "inside" ? "down" : rounding === "outside" ? "up" : "nearest",
     up: rounding === "inside" ? "up" : rounding === "outside" ? "down" : "nearest",
@@ -217,7 +220,7 @@ function styleOf(limits: Limits, style: WriteLimitsStyle, rounding: LimitsRoundi
         symbol: false,
         sign: signed ? "always" : "negative",
         ...(numbers === undefined ? {} : { style: numbers }),
-        ...(decimalMark === undefined ? {} : { decimalMark }),
+        decimalMark,
       }),
   };
 }
@@ -234,9 +237,14 @@ function roundingOf(asked: LimitsRounding | undefined): LimitsRounding {
 }
 
 /** Gives two numbers the same number of decimals; a plain zero stays plain. */
-function alignDecimals(high: string, low: string): [string, string] {
+function alignDecimals(style: Style, high: string, low: string): [string, string] {
   const places = Math.max(decimalsOf(high), decimalsOf(low));
-  return [padDecimals(high, places), padDecimals(low, places)];
+  const align = (text: string): string => {
+    const missing = places - decimalsOf(text);
+    if (text === "0" || missing === 0) return text;
+    return `${decimalsOf(text) === 0 ? text + style.decimalMark : text}${"0".repeat(missing)}`;
+  };
+  return [align(high), align(low)];
 }
 
 /** Inch practice signs a zero deviation and keeps its decimals; metric practice writes a plain 0. */
@@ -247,12 +255,6 @@ function signedZero(sign: "+" | "-", text: string): string {
 function decimalsOf(text: string): number {
   const mark = text.search(/[.,]/);
   return mark < 0 ? 0 : text.length - mark - 1;
-}
-
-function padDecimals(text: string, places: number): string {
-  const missing = places - decimalsOf(text);
-  if (text === "0" || missing === 0) return text;
-  return `${decimalsOf(text) === 0 ? `${text}.` : text}${"0".repeat(missing)}`;
 }
 
 function sum(nominal: Length, deviation: Length): Length {

@@ -64,7 +64,7 @@ export function defaultLimits(
   if (typeof given === "string") return textDefault(checked, given);
   if (typeof given === "object" && given !== null) {
     if (Object.hasOwn(given, "microarcseconds")) return angleDefault(checked, given as AngleData);
-    if (Object.hasOwn(given, "length")) return lengthDefault(checked, given as WrittenDimensionLike);
+    if (Object.hasOwn(given, "form")) return lengthDefault(checked, given as WrittenDimensionLike);
   }
   throw new LimitsError("TITLE_BLOCK_NOT_APPLICABLE", "a default goes by how the size was written", {
     value: given,

@@ -3,7 +3,6 @@ import { LimitsError } from "../errors.js";
 import { isMadeLength, lengthOfTicks } from "./length.js";
 import type { Length, LengthLike } from "./length.js";
 import { readLength } from "./readLength.js";
-import { ticksPerUnit } from "./ticksPerUnit.js";
 
 const { hasOwn } = Object;
 
@@ -42,6 +41,5 @@ export function asLength(value: LengthLike, path: readonly (string | number)[] =
   if (!Number.isSafeInteger(value.ticks)) {
     throw new LimitsError("LENGTH_INVALID", "the ticks of a length are a whole number", { value: value.ticks, path });
   }
-  atPath(path, () => ticksPerUnit(value.unit));
-  return lengthOfTicks(value.ticks, value.unit);
+  return atPath(path, () => lengthOfTicks(value.ticks, value.unit));
 }

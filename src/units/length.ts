@@ -58,7 +58,7 @@ class LengthValue implements Length {
  * @param ticks - a whole number of ticks, safe in a double: 1 mm is 10 000 000, 1 in is 254 000 000
  * @param unit - the unit to show it in: `mm`, `um`, `in`, `thou`, `uin`
  * @returns the length; every {@link Length} comes into being here
- * @throws `LENGTH_OUT_OF_RANGE` for what is not a safe whole number
+ * @throws `LENGTH_OUT_OF_RANGE` for what is not a safe whole number, `UNIT_UNKNOWN`
  * @example
  * ```ts
  * import { lengthOfTicks } from "limitsmith";
@@ -74,6 +74,7 @@ export function lengthOfTicks(ticks: number, unit: LengthUnit): Length {
       allowed: "up to 900 719 925 474.0991 mm (about 900 000 km) either way",
     });
   }
+  ticksPerUnit(unit);
   // -0 would show as "-0 mm" and fail an identity test
   return new LengthValue(ticks === 0 ? 0 : ticks, unit);
 }

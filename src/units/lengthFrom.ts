@@ -66,8 +66,13 @@ function fromDouble(value: number, unit: LengthUnit): Length {
 }
 
 function decimalText(value: unknown): string {
+  // a boxed number has a toFixed too, but one that drops its decimals
   const text: unknown =
-    typeof value === "object" && value !== null && "toFixed" in value && typeof value.toFixed === "function"
+    typeof value === "object" &&
+    value !== null &&
+    typeof value.valueOf() !== "number" &&
+    "toFixed" in value &&
+    typeof value.toFixed === "function"
       ? (value as DecimalLike).toFixed()
       : undefined;
   if (typeof text !== "string") {

@@ -4,6 +4,7 @@ import type { Length, LengthLike, LengthUnit } from "./length.js";
 import { decimalMarkOf, lengthOfNumber } from "./lengthFrom.js";
 import type { ReadOptions } from "./lengthFrom.js";
 import { readNumber } from "./readNumber.js";
+import { lengthText } from "./lengthText.js";
 import { splitUnit } from "./splitUnit.js";
 
 /** A size as it stands on a drawing: its exact length, and how it was written. */
@@ -32,7 +33,7 @@ export interface ReadDimensionOptions extends ReadOptions {
  *
  * `2.5`, `2.50` and `2.500` are one length but three statements: a title block gives each its own tolerance.
  *
- * @param text - a decimal, or an inch fraction or mixed number, with or without a unit; up to 60 characters
+ * @param text - a decimal, or an inch fraction or mixed number, with or without a unit; up to 100 characters
  * @param options - `unit` of the drawing (mm, in …) for a bare number, `decimalMark`
  * @returns the exact length with its unit, and the form in which it was written
  * @throws `UNIT_MISSING` where neither the text nor the options have a unit, and what {@link readLength} throws
@@ -46,7 +47,7 @@ export interface ReadDimensionOptions extends ReadOptions {
  * @reference ASME Y14.5-2018, 4.3, for the meaning of written decimals, from memory
  */
 export function readDimension(text: string, options?: ReadDimensionOptions): WrittenDimension {
-  const { number, unit: writtenUnit } = splitUnit(text.trim());
+  const { number, unit: writtenUnit } = splitUnit(lengthText(text));
   const unit = writtenUnit ?? ownValue(options, "unit");
   const read = readNumber(number, decimalMarkOf(options));
   if (unit === undefined) {

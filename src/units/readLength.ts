@@ -2,9 +2,8 @@ import { LimitsError } from "../errors.js";
 import type { Length } from "./length.js";
 import { decimalMarkOf, lengthFrom } from "./lengthFrom.js";
 import type { ReadOptions } from "./lengthFrom.js";
+import { lengthText } from "./lengthText.js";
 import { splitUnit } from "./splitUnit.js";
-
-const LONGEST_LENGTH_TEXT = 100;
 
 /**
  * Reads a length from a text that carries its unit.
@@ -27,17 +26,7 @@ const LONGEST_LENGTH_TEXT = 100;
  * @reference 1 in = 25.4 mm exactly: the international yard and pound agreement of 1959
  */
 export function readLength(text: string, options?: ReadOptions): Length {
-  const given: unknown = text;
-  if (typeof given !== "string") {
-    throw new LimitsError("LENGTH_INVALID", "a text is needed here", { value: given, allowed: 'such as "40 mm"' });
-  }
-  if (text.length > LONGEST_LENGTH_TEXT) {
-    throw new LimitsError("TEXT_TOO_LONG", "the text is too long to be a length", {
-      value: text,
-      allowed: `up to ${LONGEST_LENGTH_TEXT} characters`,
-    });
-  }
-  const { number, unit } = splitUnit(text.trim());
+  const { number, unit } = splitUnit(lengthText(text));
   if (number === "") throw new LimitsError("TEXT_EMPTY", "there is no number here", { value: text });
   if (unit === null) {
     throw new LimitsError("UNIT_MISSING", "a number without a unit is not a length", {

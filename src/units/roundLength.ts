@@ -9,7 +9,7 @@ import { ticksPerUnit } from "./ticksPerUnit.js";
 
 /** Options of {@link roundLength}. */
 export interface RoundLengthOptions {
-  /** Decimals to keep; the step must be a whole number of ticks: to 7 in mm, 4 in µm, 6 in inches, 3 in thou, 0 in µin. */
+  /** Decimals to keep; to 7 in mm, 4 in µm, 6 in inches, 3 in thou, 0 in µin; in inch units one more where the length ends there. */
   readonly places: number;
   /** Unit of those decimals; the length's own unit unless said otherwise. */
   readonly unit?: LengthUnit;
@@ -37,13 +37,31 @@ export function roundLength(length: LengthLike, options: RoundLengthOptions): Le
   const value = asLength(length);
   const unit = ownValue(options, "unit") ?? value.unit;
   const places = ownValue(options, "places") ?? NaN;
-  const stepTicks = ticksPerUnit(unit) / 10 ** places;
-  if (!Number.isInteger(places) || places < 0 || !Number.isInteger(stepTicks)) {
-    throw new LimitsError("OPTION_INVALID", "a length cannot be rounded to that many decimals of that unit", {
-      value: places,
-      allowed: "0 to 7 decimals of mm, 4 of µm, 6 of inches, 3 of thou, 0 of µin",
-    });
+  const rounding = ownValue(options, "rounding") ?? "nearest";
+  if (!Number.isInteger(places) || places < 0 || places > mostPlaces(unit)) throw tooFine(places);
+  const steps = roundedToPlaces(value.ticks, unit, places, rounding);
+  // the last decimal of an inch unit is a whole number of ticks only now and then: .0078125 in
+  const scaled = steps * BigInt(ticksPerUnit(unit));
+  const perStep = 10n ** BigInt(places);
+  if (scaled % perStep !== 0n) throw tooFine(places);
+  return lengthOfTicks(Number(scaled / perStep), unit);
+}
+
+function mostPlaces(unit: LengthUnit): number {
+  switch (unit) {
+    case "um":
+    case "thou":
+      return 4;
+    case "uin":
+      return 1;
+    default:
+      return 7;
   }
-  const steps = roundedToPlaces(value.ticks, unit, places, ownValue(options, "rounding") ?? "nearest");
-  return lengthOfTicks(Number(steps) * stepTicks, unit);
+}
+
+function tooFine(places: number): LimitsError {
+  return new LimitsError("OPTION_INVALID", "a length cannot be rounded to that many decimals of that unit", {
+    value: places,
+    allowed: "0 to 7 decimals of mm, 4 of µm, 6 of inches, 3 of thou, 0 of µin; in inch units one more where it ends there",
+  });
 }

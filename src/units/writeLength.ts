@@ -61,10 +61,12 @@ export function writeLength(length: LengthLike, options?: WriteLengthOptions): s
   const rounded = roundedToPlaces(value.ticks, unit, places, ownValue(options, "rounding") ?? "nearest");
   const style = styleOf(ownValue(options, "style"), unit);
 
+  const { sign, symbol } = looksOf(options);
+
   let text = style === "inch" ? paddedText(rounded, places).replace(/^(-?)0\./, "$1.") : scaledText(rounded, places);
-  if (ownValue(options, "sign") === "always" && rounded > 0n) text = `+${text}`;
+  if (sign === "always" && rounded > 0n) text = `+${text}`;
   if (decimalMarkOf(options) === ",") text = text.replace(".", ",");
-  return (ownValue(options, "symbol") ?? true) ? `${text} ${unitSymbol(unit)}` : text;
+  return symbol ? `${text} ${unitSymbol(unit)}` : text;
 }
 
 function placesOf(value: Length, unit: LengthUnit, asked: number | undefined): number {
@@ -85,6 +87,18 @@ function placesOf(value: Length, unit: LengthUnit, asked: number | undefined): n
     });
   }
   return exact;
+}
+
+function looksOf(options: WriteLengthOptions | undefined): { sign: "negative" | "always"; symbol: boolean } {
+  const sign: unknown = ownValue(options, "sign") ?? "negative";
+  const symbol: unknown = ownValue(options, "symbol") ?? true;
+  if (sign !== "negative" && sign !== "always") {
+    throw new LimitsError("OPTION_INVALID", "not a rule for signs", { value: sign, allowed: "negative, always" });
+  }
+  if (typeof symbol !== "boolean") {
+    throw new LimitsError("OPTION_INVALID", "symbol is true or false", { value: symbol, allowed: "true, false" });
+  }
+  return { sign, symbol };
 }
 
 function styleOf(asked: NumberStyle | undefined, unit: LengthUnit): NumberStyle {

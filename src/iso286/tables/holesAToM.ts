@@ -25,5 +25,11 @@ export const HOLES_J: Readonly<Record<string, DeviationColumn>> = {
   },
 };
 
+/** How sure K is over 400 to 500 mm: the mark of Table 2, which is not that of the mirrored shaft value. */
+export const K_OVER_400_TO_500_MARK = "1";
+
+/** How sure the departing value of M6 is. */
+export const M6_OVER_250_TO_315_MARK = "1";
+
 /** ES of M6 over 250 to 315 mm, in µm, printed where the rule would give -11. */
 export const M6_OVER_250_TO_315_UM = -9;
