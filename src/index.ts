@@ -1,8 +1,12 @@
 export type { Basis, BasisHow, BasisStep, Caution, Mark } from "./basis.js";
 export * from "./callout/index.js";
+export * from "./compare/index.js";
 export { LimitsError, attempt } from "./errors.js";
 export type { Attempt, ErrorCode, LimitsErrorDetails, LimitsProblem, TextSpan } from "./errors.js";
+export * from "./finish/index.js";
+export * from "./inchFits/index.js";
 export * from "./iso286/index.js";
+export * from "./keys/index.js";
 export * from "./limits/index.js";
 export * from "./titleBlock/index.js";
 export * from "./units/index.js";

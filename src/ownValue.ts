@@ -1,5 +1,5 @@
-// Captured at load, so that a page that patches Object afterwards changes nothing here.
-const { hasOwn } = Object;
+/** Captured at load, so that a page that patches Object afterwards changes nothing here. */
+export const hasOwn: (object: object, key: PropertyKey) => boolean = Object.hasOwn;
 
 /**
  * Reads an option or a field by own key only, so that a polluted `Object.prototype` cannot supply one.

@@ -47,10 +47,36 @@ function source(basis) {
     .join("; ");
 }
 
-function cells(row) {
+/** The lines of the table for one row: one, or one for each dimension of a keyseat. */
+function linesOf(row) {
   const head = [row.id ?? `#${row.index}`, row.name ?? "", row.callout ?? ""];
-  if (!row.ok) return [...head, "", "", "", "", `${row.error.code}: ${row.error.message}`];
-  const { resolved } = row;
+  if (!row.ok) return [[...head, "", "", "", "", "", `${row.error.code}: ${row.error.message}`]];
+  if (row.resolved.outcome === "keyseat") return keyseatLines(head, row.resolved.seat);
+  const [id, name, callout, ...rest] = cells(head, row.resolved);
+  const from = rest.pop();
+  const finish = row.surface?.finish;
+  return [[id, name, callout, ...rest, finish == null ? "" : `Ra ${finish.value}`, from]];
+}
+
+function keyseatLines([id, name], seat) {
+  return seat.rows.map(({ symbol, limits }) =>
+    limits === null
+      ? [id, name, symbol, "-", "", "no limits in the standard", "", "", seat.standard]
+      : [
+          id,
+          name,
+          symbol,
+          "-",
+          deviations(limits),
+          bothLimits(limits, "in", 4),
+          bothLimits(limits, "mm", 3),
+          "",
+          seat.standard,
+        ],
+  );
+}
+
+function cells(head, resolved) {
   switch (resolved.outcome) {
     case "limits": {
       const { limits } = resolved;
@@ -68,6 +94,18 @@ function cells(row) {
       const show = (unit, places) =>
         `${kind} ${writeLength(limit, { unit, places, symbol: false, rounding: kind === "max" ? "down" : "up" })}`;
       return [...head, "-", "", show("in", 4), show("mm", 3), "the drawing, callout"];
+    }
+    case "chamfer": {
+      const { limits, angle } = resolved;
+      const angles = `${angle.max}/${angle.min}`;
+      return [
+        ...head,
+        "-",
+        deviations(limits),
+        `${bothLimits(limits, "in", 4)}  ${angles}`,
+        bothLimits(limits, "mm", 3),
+        source(limits.basis),
+      ];
     }
     case "angle": {
       const { angle } = resolved;
@@ -103,8 +141,9 @@ function printFits(fits) {
       `${hole} on ${shaft}: ${fit.kind} fit${fit.designation === null ? "" : ` ${fit.designation}`}, ` +
         `clearance ${show("thou", 2)} thou (${show("um", 1)} µm; minus is interference)`,
     );
-    for (const caution of fit.cautions) console.log(`    caution: ${caution.says}`);
   }
+  const cautions = fits.flatMap((one) => (one.ok ? one.fit.cautions : []));
+  for (const says of new Set(cautions.map((caution) => caution.says))) console.log(`caution: ${says}`);
 }
 
 const path = process.argv[2] ?? ownDrawing;
@@ -119,11 +158,14 @@ try {
 
 console.log(`${sheet.drawing}\n`);
 printTable(
-  ["id", "feature", "callout", "class", "deviations, µm", "max/min, in", "max/min, mm", "source"],
-  sheet.rows.map(cells),
+  ["id", "feature", "callout", "class", "deviations, µm", "max/min, in", "max/min, mm", "finish", "source"],
+  sheet.rows.flatMap(linesOf),
 );
 console.log("\n* rounded inside: no part that the exact limits reject is accepted\n");
 printFits(sheet.fits);
+for (const { code, severity, features, says, settle } of sheet.findings) {
+  console.log(`\n${severity} ${code} (${features.join(", ")}): ${says}\n    settle it by: ${settle}`);
+}
 for (const problem of sheet.problems) console.log(`\nproblem: ${problem.code}: ${problem.message}`);
 for (const key of sheet.unknownKeys) console.log(`\nnot known, passed over: ${key.join(".")}`);
 const { features, failed, fits, fitsFailed } = sheet.counts;

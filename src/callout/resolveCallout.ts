@@ -1,10 +1,12 @@
 import { LimitsError } from "../errors.js";
+import { inchFit } from "../inchFits/index.js";
 import { isoFit, isoLimits, parseToleranceClass } from "../iso286/index.js";
-import { limits, limitsFromMaxMin, singleLimit } from "../limits/index.js";
+import { angleLimits, limits, limitsFromMaxMin, singleLimit } from "../limits/index.js";
 import type { AngleLimits, Fit, Limits, SingleLimit } from "../limits/index.js";
 import { ownValue } from "../ownValue.js";
 import { defaultLimits } from "../titleBlock/index.js";
 import type { TitleBlock, TitleBlockSpec } from "../titleBlock/index.js";
+import type { WrittenDimension } from "../units/index.js";
 import { asRequest } from "./asRequest.js";
 import { readCallout } from "./readCallout.js";
 import type { CalloutOptions } from "./readSize.js";
@@ -18,13 +20,62 @@ export interface CalloutContext extends CalloutOptions {
   readonly titleBlock?: TitleBlock | TitleBlockSpec;
 }
 
+/** What every outcome has. */
+interface OutcomeBase {
+  readonly request: CalloutRequest;
+  /** Limits of the depth, by the title block; `null` where the callout has no depth. */
+  readonly depth: Limits | null;
+}
+
+/** Limits of one size, and the fit that they come from where the callout or its class is one. */
+export interface LimitsOutcome extends OutcomeBase {
+  readonly outcome: "limits";
+  readonly limits: Limits;
+  readonly fit: Fit | null;
+}
+
+/** A fit, where nothing says which of its members the callout stands on. */
+export interface FitOutcome extends OutcomeBase {
+  readonly outcome: "fit";
+  readonly fit: Fit;
+}
+
+/** One limit of size. */
+export interface SingleLimitOutcome extends OutcomeBase {
+  readonly outcome: "single limit";
+  readonly single: SingleLimit;
+}
+
+/** Limits of an angle. */
+export interface AngleOutcome extends OutcomeBase {
+  readonly outcome: "angle";
+  readonly angle: AngleLimits;
+}
+
+/** Limits of a chamfer's length and angle. */
+export interface ChamferOutcome extends OutcomeBase {
+  readonly outcome: "chamfer";
+  readonly limits: Limits;
+  readonly angle: AngleLimits;
+}
+
+/** A size without limits of its own, and why: reference, basic, thread. */
+export interface NoLimitsOutcome extends OutcomeBase {
+  readonly outcome: "no limits";
+  readonly reason: string;
+}
+
 /** A callout turned into limits, told apart by `outcome`: plain frozen data. */
 export type ResolvedCallout =
-  | { readonly outcome: "limits"; readonly request: CalloutRequest; readonly limits: Limits; readonly fit: Fit | null }
-  | { readonly outcome: "fit"; readonly request: CalloutRequest; readonly fit: Fit }
-  | { readonly outcome: "single limit"; readonly request: CalloutRequest; readonly single: SingleLimit }
-  | { readonly outcome: "angle"; readonly request: CalloutRequest; readonly angle: AngleLimits }
-  | { readonly outcome: "no limits"; readonly request: CalloutRequest; readonly reason: string };
+  | LimitsOutcome
+  | FitOutcome
+  | SingleLimitOutcome
+  | AngleOutcome
+  | ChamferOutcome
+  | NoLimitsOutcome;
+
+type Block = TitleBlock | TitleBlockSpec | undefined;
+type BareOutcome<Outcome = ResolvedCallout> = Outcome extends ResolvedCallout ? Omit<Outcome, keyof OutcomeBase> : never;
 
 /**
  * Turns a callout into limits, by its class, its own tolerance, or the title block.
@@ -32,9 +83,9 @@ export type ResolvedCallout =
  * @param callout - the text, or a request that {@link readCallout} gave
  * @param context - `unit` of the drawing (mm, in …), `decimalMark`, `feature` (hole or shaft), `titleBlock`
  * @returns the frozen outcome: limits in the unit of the size; for a fit on a known feature, the limits of that
- *   member and the fit; reference and basic dimensions have none, with the reason
+ *   member and the fit; reference and basic dimensions and threads have none, with the reason
  * @throws `CALLOUT_KIND_MISMATCH`, `TITLE_BLOCK_MISSING`, and what {@link readCallout}, {@link isoLimits},
- *   {@link isoFit} and {@link defaultLimits} throw
+ *   {@link isoFit}, {@link inchFit} and {@link defaultLimits} throw
  * @example
  * ```ts
  * import { resolveCallout } from "limitsmith";
@@ -46,12 +97,12 @@ export type ResolvedCallout =
  * seat.outcome === "limits" ? seat.limits.max.toString() : ""; // → "35.018 mm"
  * resolveCallout("(3.125)", { titleBlock }).outcome; // → "no limits"
  * ```
- * @reference ISO 286-1:2010 for classes; ASME Y14.5-2018, 5.1.1 for defaults, from memory
+ * @reference ISO 286-1:2010 and ANSI B4.1-1967 for classes; ASME Y14.5-2018, 5.1.1 for defaults, from memory
  */
 export function resolveCallout(callout: string | CalloutRequest, context: CalloutContext = {}): ResolvedCallout {
   const block = ownValue(context, "titleBlock");
-  const unit = ownValue(context, "unit") ?? block?.unit;
-  const decimalMark = ownValue(context, "decimalMark") ?? block?.decimalMark;
+  const unit = ownValue(context, "unit") ?? ownValue(block, "unit");
+  const decimalMark = ownValue(context, "decimalMark") ?? ownValue(block, "decimalMark");
   const request =
     typeof callout === "string"
       ? readCallout(callout, {
@@ -59,53 +110,76 @@ export function resolveCallout(callout: string | CalloutRequest, context: Callou
           ...(decimalMark === undefined ? {} : { decimalMark }),
         })
       : asRequest(callout);
-  return Object.freeze(resolve(request, ownValue(context, "feature"), block));
+  const { depth } = request;
+  return Object.freeze({
+    ...resolve(request, ownValue(context, "feature"), block),
+    request,
+    depth: depth === null ? null : byBlock(block, request, depth),
+  });
 }
 
-function resolve(
-  request: CalloutRequest,
-  feature: "hole" | "shaft" | undefined,
-  block: TitleBlock | TitleBlockSpec | undefined,
-): ResolvedCallout {
+function resolve(request: CalloutRequest, feature: "hole" | "shaft" | undefined, block: Block): BareOutcome {
   switch (request.kind) {
     case "class":
       refuseOtherKind(request.toleranceClass, feature);
-      return asOutcome(request, isoLimits(request.nominal.length, request.toleranceClass));
+      return found(isoLimits(request.nominal.length, request.toleranceClass));
     case "fit":
-      return fitOutcome(request, isoFit(request.nominal.length, request.fit), feature);
+      return memberOf(isoFit(request.nominal.length, request.fit), feature);
+    case "inch class":
+      refuseOtherMember(request.member, feature);
+      return memberOf(inchFit(request.nominal.length, request.inchClass), feature ?? request.member ?? undefined);
     case "deviations": {
       const { nominal, upper, lower } = request;
-      return asOutcome(request, limits({ nominal: nominal.length, upper, lower, basis: drawingStep(request.text) }));
+      return found(limits({ nominal: nominal.length, upper, lower, basis: drawingStep(request.text) }));
     }
     case "limits": {
       const { max, min } = request;
-      return asOutcome(request, limitsFromMaxMin({ max: max.length, min: min.length, basis: drawingStep(request.text) }));
+      return found(limitsFromMaxMin({ max: max.length, min: min.length, basis: drawingStep(request.text) }));
     }
-    case "single limit": {
-      const single = singleLimit(request.side, request.size.length, drawingStep(request.text));
-      return { outcome: "single limit", request, single };
-    }
+    case "single limit":
+      return { outcome: "single limit", single: singleLimit(request.side, request.size.length, drawingStep(request.text)) };
     case "plain":
-      return asOutcome(request, defaultLimits(needBlock(block, request.text), request.nominal).limits);
+      return found(byBlock(block, request, request.nominal));
     case "angle":
-      return { outcome: "angle", request, angle: defaultLimits(needBlock(block, request.text), request.angle).limits };
+      return { outcome: "angle", angle: angleOf(request, block) };
+    case "chamfer":
+      return { outcome: "chamfer", limits: chamferLength(request, block), angle: angleOf(request, block) };
     case "reference":
-      return { outcome: "no limits", request, reason: "a reference dimension is for information only" };
+      return { outcome: "no limits", reason: "a reference dimension is for information only" };
     case "basic":
-      return { outcome: "no limits", request, reason: "a basic dimension is theoretically exact; its tolerance stands in a frame" };
+      return { outcome: "no limits", reason: "a basic dimension is theoretically exact; its tolerance stands in a frame" };
+    case "thread":
+      return { outcome: "no limits", reason: "a thread is governed by its own standard; no default tolerance applies" };
   }
 }
 
-function fitOutcome(request: CalloutRequest, fit: Fit, feature: "hole" | "shaft" | undefined): ResolvedCallout {
-  if (feature === undefined) return { outcome: "fit", request, fit };
-  return { outcome: "limits", request, limits: fit[feature], fit };
+function found(limitsFound: Limits): BareOutcome<LimitsOutcome> {
+  return { outcome: "limits", limits: limitsFound, fit: null };
 }
 
-function asOutcome(request: CalloutRequest, found: Limits): ResolvedCallout {
-  return { outcome: "limits", request, limits: found, fit: null };
+function memberOf(fit: Fit, feature: "hole" | "shaft" | undefined): BareOutcome {
+  return feature === undefined ? { outcome: "fit", fit } : { outcome: "limits", limits: fit[feature], fit };
 }
 
-function needBlock(block: TitleBlock | TitleBlockSpec | undefined, text: string): TitleBlock | TitleBlockSpec {
+function byBlock(block: Block, request: CalloutRequest, size: WrittenDimension): Limits {
+  return defaultLimits(needBlock(block, request.text), size).limits;
+}
+
+function chamferLength(request: CalloutRequest & { readonly kind: "chamfer" }, block: Block): Limits {
+  const { length, deviations, text } = request;
+  if (deviations === null) return byBlock(block, request, length);
+  return limits({ nominal: length.length, ...deviations, basis: drawingStep(text) });
+}
+
+function angleOf(request: CalloutRequest & { readonly kind: "angle" | "chamfer" }, block: Block): AngleLimits {
+  const { angle, text } = request;
+  if (request.kind === "angle" && request.deviations !== null) {
+    return angleLimits({ nominal: angle, ...request.deviations, basis: drawingStep(text) });
+  }
+  return defaultLimits(needBlock(block, text), angle).limits;
+}
+
+function needBlock(block: Block, text: string): TitleBlock | TitleBlockSpec {
   if (block !== undefined) return block;
   throw new LimitsError("TITLE_BLOCK_MISSING", "a size without a tolerance falls to the title block, and there is none", {
     value: text,
@@ -119,6 +193,14 @@ function refuseOtherKind(toleranceClass: string, feature: "hole" | "shaft" | und
   throw new LimitsError("CALLOUT_KIND_MISMATCH", `${text} is a class of a ${kind}, the feature is a ${feature}`, {
     value: text,
     allowed: feature === "hole" ? "a capital letter for a hole" : "a small letter for a shaft",
+  });
+}
+
+function refuseOtherMember(member: "hole" | "shaft" | null, feature: "hole" | "shaft" | undefined): void {
+  if (member === null || feature === undefined || member === feature) return;
+  throw new LimitsError("CALLOUT_KIND_MISMATCH", `the callout says ${member}, the feature is a ${feature}`, {
+    value: member,
+    allowed: feature,
   });
 }
 

@@ -1,13 +1,15 @@
-import type { Basis, BasisStep } from "../basis.js";
+import type { BasisStep } from "../basis.js";
+import { deviationSet } from "../limits/index.js";
+import type { DeviationSet } from "../limits/index.js";
 import { lengthOfTicks } from "../units/index.js";
-import type { Length } from "../units/index.js";
 import { fundamental } from "./fundamental.js";
 import type { Fundamental } from "./fundamental.js";
 import { gradeStep, gradeValue } from "./gradeValue.js";
 import { DEFAULT_ISO_OPTIONS } from "./isoOptions.js";
 import type { ChosenIsoOptions } from "./isoOptions.js";
+import type { ParsedClass } from "./parsedClass.js";
 import { spanStep } from "./printedSpan.js";
-import { STEP_COUNT, stepAt } from "./sizeStep.js";
+import { stepAt } from "./sizeStep.js";
 import { gradeNumber } from "./toleranceClass.js";
 import type { ToleranceClass } from "./toleranceClass.js";
 
@@ -22,24 +24,15 @@ export interface DeviationsUm {
 /** A class worked out for one size step. */
 export interface ClassAtStep {
   readonly um: DeviationsUm;
-  readonly upper: Length;
-  readonly lower: Length;
-  readonly basis: Basis;
+  readonly set: DeviationSet;
 }
 
 const TICKS_PER_UM = 10_000;
-// no more entries than classes, each with one place a step: the whole system worked out once
-const cache: Map<string, (ClassAtStep | undefined)[]> = new Map<string, (ClassAtStep | undefined)[]>();
 
-/** Works a class out for a step; remembers the answer, which depends on nothing else. */
-export function classAtStep(cls: ToleranceClass, stepIndex: number, options: ChosenIsoOptions): ClassAtStep {
+/** Works a class out for a step; the class remembers the answer, which depends on nothing else. */
+export function classAtStep(cls: ParsedClass, stepIndex: number, options: ChosenIsoOptions): ClassAtStep {
   if (options !== DEFAULT_ISO_OPTIONS) return workOut(cls, stepIndex, options);
-  let row = cache.get(cls.text);
-  if (row === undefined) {
-    row = new Array<ClassAtStep | undefined>(STEP_COUNT).fill(undefined);
-    cache.set(cls.text, row);
-  }
-  return (row[stepIndex] ??= workOut(cls, stepIndex, options));
+  return cls.atStep(stepIndex) ?? cls.keep(stepIndex, workOut(cls, stepIndex, options));
 }
 
 function workOut(cls: ToleranceClass, stepIndex: number, options: ChosenIsoOptions): ClassAtStep {
@@ -61,9 +54,12 @@ function workOut(cls: ToleranceClass, stepIndex: number, options: ChosenIsoOptio
       upperDeviationUm: upperTicks / TICKS_PER_UM,
       lowerDeviationUm: lowerTicks / TICKS_PER_UM,
     }),
-    upper: lengthOfTicks(upperTicks, "um"),
-    lower: lengthOfTicks(lowerTicks, "um"),
-    basis: Object.freeze(basis),
+    set: deviationSet(
+      lengthOfTicks(upperTicks, "um"),
+      lengthOfTicks(lowerTicks, "um"),
+      Object.freeze(basis),
+      cls.text,
+    ),
   };
 }
 

@@ -1,8 +1,8 @@
+import { markOf } from "../basis.js";
 import type { BasisStep } from "../basis.js";
 import { LimitsError } from "../errors.js";
 import type { DeviationColumn } from "./deviationColumn.js";
 import type { IsoEdition } from "./isoOptions.js";
-import { markOf } from "./markOf.js";
 import { stepText } from "./sizeStep.js";
 import type { SizeStep } from "./sizeStep.js";
 import { DELTAS_UM } from "./tables/deltas.js";

@@ -17,6 +17,7 @@ export interface FundamentalDeviation {
   readonly deviation: Length;
   /** The delta that is part of it, in µm; zero where none applies. */
   readonly delta: Length;
+  /** Where the value stands. */
   readonly basis: Basis;
 }
 

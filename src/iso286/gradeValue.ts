@@ -1,6 +1,6 @@
+import { markOf } from "../basis.js";
 import type { BasisStep } from "../basis.js";
 import { LimitsError } from "../errors.js";
-import { markOf } from "./markOf.js";
 import { stepText } from "./sizeStep.js";
 import type { SizeStep } from "./sizeStep.js";
 import { STANDARD_TOLERANCES } from "./tables/standardTolerances.js";

@@ -4,7 +4,7 @@ import { classAtStep } from "./classAtStep.js";
 import type { DeviationsUm } from "./classAtStep.js";
 import { isoOptions } from "./isoOptions.js";
 import type { IsoOptions } from "./isoOptions.js";
-import { parseToleranceClass } from "./parseToleranceClass.js";
+import { parsedClass } from "./parseToleranceClass.js";
 import type { ToleranceClassLike } from "./parseToleranceClass.js";
 import { stepIndexOf } from "./sizeStep.js";
 
@@ -27,6 +27,6 @@ import { stepIndexOf } from "./sizeStep.js";
  *   holes mirror the shaft, K to ZC with delta over 3 up to 500 mm
  */
 export function isoDeviations(size: LengthLike, toleranceClass: ToleranceClassLike, options?: IsoOptions): DeviationsUm {
-  const cls = parseToleranceClass(toleranceClass);
+  const cls = parsedClass(toleranceClass);
   return classAtStep(cls, stepIndexOf(asLength(size).ticks), isoOptions(options)).um;
 }

@@ -1,13 +1,20 @@
-import { makeFit, makeLimits } from "../limits/index.js";
-import type { Fit } from "../limits/index.js";
+import { fitClearances, limitsAt, makeFit } from "../limits/index.js";
+import type { Fit, FitClearances } from "../limits/index.js";
 import { asLength } from "../units/index.js";
 import type { LengthLike } from "../units/index.js";
 import { classAtStep } from "./classAtStep.js";
+import type { ClassAtStep } from "./classAtStep.js";
 import { isoOptions } from "./isoOptions.js";
 import type { IsoOptions } from "./isoOptions.js";
 import { parseFit } from "./parseFit.js";
 import type { FitClassesLike } from "./parseFit.js";
 import { stepIndexOf } from "./sizeStep.js";
+
+// goes with its hole class: what nobody holds any more can be collected
+const clearances: WeakMap<ClassAtStep, Map<ClassAtStep, FitClearances>> = new WeakMap<
+  ClassAtStep,
+  Map<ClassAtStep, FitClearances>
+>();
 
 /**
  * An ISO fit: limits of hole and shaft, clearances, kind.
@@ -37,7 +44,18 @@ export function isoFit(size: LengthLike, fit: FitClassesLike, options?: IsoOptio
   const forHole = classAtStep(hole, step, chosen);
   const forShaft = classAtStep(shaft, step, chosen);
   return makeFit(
-    makeLimits(nominal, forHole.upper, forHole.lower, forHole.basis, hole.text),
-    makeLimits(nominal, forShaft.upper, forShaft.lower, forShaft.basis, shaft.text),
+    limitsAt(nominal, forHole.set),
+    limitsAt(nominal, forShaft.set),
+    undefined,
+    clearancesOf(forHole, forShaft),
   );
+}
+
+/** Clearances of two classes at one step, worked out once: they are alike for every size of the step. */
+function clearancesOf(hole: ClassAtStep, shaft: ClassAtStep): FitClearances {
+  let withHole = clearances.get(hole);
+  if (withHole === undefined) clearances.set(hole, (withHole = new Map<ClassAtStep, FitClearances>()));
+  let found = withHole.get(shaft);
+  if (found === undefined) withHole.set(shaft, (found = fitClearances(hole.set, shaft.set)));
+  return found;
 }

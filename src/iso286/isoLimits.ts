@@ -1,11 +1,11 @@
-import { makeLimits } from "../limits/index.js";
+import { limitsAt } from "../limits/index.js";
 import type { Limits } from "../limits/index.js";
 import { asLength } from "../units/index.js";
 import type { LengthLike } from "../units/index.js";
 import { classAtStep } from "./classAtStep.js";
 import { isoOptions } from "./isoOptions.js";
 import type { IsoOptions } from "./isoOptions.js";
-import { parseToleranceClass } from "./parseToleranceClass.js";
+import { parsedClass } from "./parseToleranceClass.js";
 import type { ToleranceClassLike } from "./parseToleranceClass.js";
 import { stepIndexOf } from "./sizeStep.js";
 
@@ -30,8 +30,7 @@ import { stepIndexOf } from "./sizeStep.js";
  * @reference ISO 286-1:2010, Tables 1 to 5 and 4.3; ISO 286-2:2010 for what is printed there
  */
 export function isoLimits(size: LengthLike, toleranceClass: ToleranceClassLike, options?: IsoOptions): Limits {
-  const cls = parseToleranceClass(toleranceClass);
+  const cls = parsedClass(toleranceClass);
   const nominal = asLength(size);
-  const { upper, lower, basis } = classAtStep(cls, stepIndexOf(nominal.ticks), isoOptions(options));
-  return makeLimits(nominal, upper, lower, basis, cls.text);
+  return limitsAt(nominal, classAtStep(cls, stepIndexOf(nominal.ticks), isoOptions(options)).set);
 }

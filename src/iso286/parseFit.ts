@@ -1,12 +1,14 @@
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
-import { parseToleranceClass } from "./parseToleranceClass.js";
+import { parsedClass } from "./parseToleranceClass.js";
 import type { ToleranceClassLike } from "./parseToleranceClass.js";
-import type { ToleranceClass } from "./toleranceClass.js";
+import type { ParsedClass } from "./parsedClass.js";
 
 /** Hole class and shaft class given apart. */
 export interface FitClasses {
+  /** Such as `"H7"`. */
   readonly hole: ToleranceClassLike;
+  /** Such as `"m6"`. */
   readonly shaft: ToleranceClassLike;
 }
 
@@ -15,15 +17,17 @@ export type FitClassesLike = string | FitClasses;
 
 /** Both classes of a fit, taken apart. */
 export interface ParsedFit {
-  readonly hole: ToleranceClass;
-  readonly shaft: ToleranceClass;
+  readonly hole: ParsedClass;
+  readonly shaft: ParsedClass;
 }
+
+const LONGEST_FIT = 80;
 
 /** Takes a fit apart; two holes or two shafts are refused. */
 export function parseFit(fit: FitClassesLike): ParsedFit {
   const { hole, shaft } = typeof fit === "string" ? splitFit(fit) : givenApart(fit);
-  const first = parseToleranceClass(hole);
-  const second = parseToleranceClass(shaft);
+  const first = parsedClass(hole);
+  const second = parsedClass(shaft);
   if (first.kind !== "hole" || second.kind !== "shaft") {
     throw new LimitsError("FIT_NOT_HOLE_AND_SHAFT", "a fit is a hole class and a shaft class, in this order", {
       value: `${first.text}/${second.text}`,
@@ -34,6 +38,7 @@ export function parseFit(fit: FitClassesLike): ParsedFit {
 }
 
 function splitFit(text: string): FitClasses {
+  if (text.length > LONGEST_FIT) throw malformed(text);
   let mark = text.indexOf("/");
   if (mark < 0) mark = text.indexOf("-");
   if (mark < 0) throw malformed(text);

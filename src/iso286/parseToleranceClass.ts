@@ -1,14 +1,16 @@
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
+import { ParsedClass } from "./parsedClass.js";
 import { GRADES, SHAFT_LETTERS } from "./toleranceClass.js";
 import type { GradeName, ToleranceClass } from "./toleranceClass.js";
 
 /** What functions take for a class: its text, or a class taken apart before. */
 export type ToleranceClassLike = string | ToleranceClass;
 
-const known: Map<string, ToleranceClass> = new Map<string, ToleranceClass>();
+const known: Map<string, ParsedClass> = new Map<string, ParsedClass>();
 const gradeNames: ReadonlySet<string> = new Set(GRADES);
 const letters: ReadonlySet<string> = new Set([...SHAFT_LETTERS, ...SHAFT_LETTERS.map((letter) => letter.toUpperCase())]);
+const LONGEST_CLASS = 40;
 const CLASS = /^([a-z]{1,2})(\d{1,2})$/i;
 
 /**
@@ -27,13 +29,26 @@ const CLASS = /^([a-z]{1,2})(\d{1,2})$/i;
  * @reference ISO 286-1:2010, 4.2.2 (tolerance class designation)
  */
 export function parseToleranceClass(text: ToleranceClassLike): ToleranceClass {
+  return parsedClass(text);
+}
+
+/** The same for this room: a class that keeps what was worked out for it. */
+export function parsedClass(text: ToleranceClassLike): ParsedClass {
+  if (typeof text === "object" && isObject(text) && ParsedClass.made(text)) return text;
   const given = textOf(text);
   const before = known.get(given);
   if (before !== undefined) return before;
-  const parsed = parse(given.trim());
-  // bounded: only texts without blanks are kept, and there are no more of those than classes
-  if (parsed.text === given) known.set(given, parsed);
+  if (given.length > LONGEST_CLASS) throw malformed(given);
+  const trimmed = given.trim();
+  const parsed = known.get(trimmed) ?? parse(trimmed);
+  // no more of these than classes: blanks are gone and what is no class was refused
+  known.set(parsed.text, parsed);
   return parsed;
+}
+
+/** The type says that it is one; what arrives from JavaScript may be null. */
+function isObject(value: unknown): value is object {
+  return value !== null;
 }
 
 function textOf(value: ToleranceClassLike): string {
@@ -44,7 +59,7 @@ function textOf(value: ToleranceClassLike): string {
   return text;
 }
 
-function parse(text: string): ToleranceClass {
+function parse(text: string): ParsedClass {
   const match = CLASS.exec(text);
   const letter = match?.[1];
   const number = match?.[2];
@@ -62,7 +77,7 @@ function parse(text: string): ToleranceClass {
       allowed: "01, 0, 1 to 18, without a leading zero",
     });
   }
-  return Object.freeze({ text, letter, grade, kind: letter === letter.toLowerCase() ? "shaft" : "hole" });
+  return new ParsedClass(text, letter, grade, letter === letter.toLowerCase() ? "shaft" : "hole");
 }
 
 function isGrade(text: string): text is GradeName {

@@ -4,6 +4,7 @@ import { FIRST_CHOICE_CLASSES, PREFERRED_HOLE_CLASSES, PREFERRED_SHAFT_CLASSES }
 export interface PreferredClass {
   /** Such as `"H7"`. */
   readonly text: string;
+  /** What the class is for: capitals are holes. */
   readonly kind: "hole" | "shaft";
   /** True for the narrower selection to try first. */
   readonly firstChoice: boolean;

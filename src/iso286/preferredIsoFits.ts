@@ -5,6 +5,7 @@ import { PREFERRED_HOLE_BASIS_FITS, PREFERRED_SHAFT_BASIS_FITS } from "./tables/
 export interface PreferredFit {
   /** Such as `"H7/g6"`. */
   readonly fit: string;
+  /** Which member keeps its limit on the nominal size. */
   readonly system: "hole basis" | "shaft basis";
   /** `ANSI B4.2` for its ten named pairs, `ISO 286-1:2010` for the other fits of its figures. */
   readonly standard: "ANSI B4.2" | "ISO 286-1:2010";

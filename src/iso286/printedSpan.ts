@@ -1,5 +1,5 @@
+import { markOf } from "../basis.js";
 import type { BasisStep } from "../basis.js";
-import { markOf } from "./markOf.js";
 import type { SizeStep } from "./sizeStep.js";
 import { PRINTED_SPANS } from "./tables/printedSpans.js";
 import { INTERMEDIATE_STEP_ENDS_MM } from "./tables/sizeSteps.js";

@@ -9,9 +9,11 @@ import type { GradeName } from "./toleranceClass.js";
 
 /** A standard tolerance and where it stands. */
 export interface StandardTolerance {
+  /** The grade that was asked for. */
   readonly grade: GradeName;
   /** The tolerance, in µm. */
   readonly tolerance: Length;
+  /** Where the value stands. */
   readonly basis: Basis;
 }
 

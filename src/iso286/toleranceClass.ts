@@ -9,7 +9,9 @@ export interface ToleranceClass {
   readonly text: string;
   /** Fundamental deviation: small letters for shafts, capitals for holes. */
   readonly letter: string;
+  /** Standard tolerance grade: its width. */
   readonly grade: GradeName;
+  /** What the class is for, by the case of its letter. */
   readonly kind: "hole" | "shaft";
 }
 

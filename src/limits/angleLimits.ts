@@ -8,20 +8,31 @@ import { freezeBasis } from "./freezeBasis.js";
 
 /** A toleranced angle: plain frozen data. */
 export interface AngleLimits {
+  /** Nominal angle that the deviations count from. */
   readonly nominal: Angle;
+  /** Upper limit deviation: `max - nominal`. */
   readonly upperDeviation: Angle;
+  /** Lower limit deviation: `min - nominal`. */
   readonly lowerDeviation: Angle;
+  /** Largest angle allowed. */
   readonly max: Angle;
+  /** Smallest angle allowed. */
   readonly min: Angle;
+  /** `max - min`. */
   readonly tolerance: Angle;
+  /** Where the numbers come from. */
   readonly basis: Basis;
 }
 
 /** A nominal angle with its two deviations. */
 export interface AngleLimitsParts {
+  /** Nominal angle. */
   readonly nominal: AngleLike;
+  /** Upper limit deviation, signed. */
   readonly upper: AngleLike;
+  /** Lower limit deviation, signed; not over the upper one. */
   readonly lower: AngleLike;
+  /** Where the numbers come from; "the caller" unless said otherwise. */
   readonly basis?: readonly BasisStep[];
 }
 

@@ -17,7 +17,7 @@ const DERIVED = ["max", "min", "tolerance", "mean"] as const;
  * @param path - keys that lead to the value in the caller's data, for the error
  * @returns frozen limits, each length in its own unit
  * @throws `LIMITS_INVALID`, `LIMITS_CONTRADICT`, `LIMITS_UPSIDE_DOWN`, `LENGTH_INVALID`, and what
- *   {@link readLength} throws for a text
+ *   `readLength` throws for a text
  * @example
  * ```ts
  * import { asLimits, limits } from "limitsmith";

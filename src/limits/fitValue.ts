@@ -13,10 +13,15 @@ export type FitSystem = "hole basis" | "shaft basis" | "hole and shaft basis" | 
 
 /** A hole and a shaft that are to go together: plain frozen data. */
 export interface Fit {
+  /** Limits of the hole. */
   readonly hole: Limits;
+  /** Limits of the shaft. */
   readonly shaft: Limits;
+  /** Nominal size, that of the hole. */
   readonly nominal: Length;
+  /** Clearance, transition or interference fit. */
   readonly kind: FitKind;
+  /** Hole basis, shaft basis, both or neither. */
   readonly system: FitSystem;
   /** `hole.max - shaft.min`; positive is clearance, negative is interference. */
   readonly maxClearance: Length;
@@ -30,6 +35,8 @@ export interface Fit {
   readonly variation: Length;
   /** Such as `"H7/m6"`; `null` where hole or shaft has no class. */
   readonly designation: string | null;
+  /** The rule behind the clearances; where the limits come from stands in theirs. */
   readonly basis: Basis;
+  /** What to weigh before relying on the fit; empty where there is nothing. */
   readonly cautions: readonly Caution[];
 }

@@ -11,8 +11,11 @@ import { makeLimits } from "./makeLimits.js";
 
 /** A nominal size with its two limit deviations. */
 export interface LimitsParts {
+  /** Nominal size. */
   readonly nominal: LengthLike;
+  /** Upper limit deviation, signed. */
   readonly upper: LengthLike;
+  /** Lower limit deviation, signed; not over the upper one. */
   readonly lower: LengthLike;
   /** Where the numbers come from; "the caller" unless said otherwise. */
   readonly basis?: readonly BasisStep[];
@@ -27,7 +30,7 @@ export interface LimitsParts {
  *   `basis` and `designation` where you know them
  * @returns frozen limits with max, min, tolerance and mean, in the nominal's unit
  * @throws `LIMITS_UPSIDE_DOWN` where upper is below lower, `LIMITS_INVALID`, `LENGTH_INVALID`,
- *   and what {@link readLength} throws for a text
+ *   and what `readLength` throws for a text
  * @example
  * ```ts
  * import { inch, limits, thou } from "limitsmith";

@@ -11,11 +11,15 @@ import { makeLimits } from "./makeLimits.js";
 
 /** Two limits of size, with the nominal where one is known. */
 export interface MaxMin {
+  /** Upper limit of size. */
   readonly max: LengthLike;
+  /** Lower limit of size; not over the upper one. */
   readonly min: LengthLike;
   /** Nominal size; the maximum where none is given, as limit dimensions have none. */
   readonly nominal?: LengthLike;
+  /** Where the numbers come from; "the caller" unless said otherwise. */
   readonly basis?: readonly BasisStep[];
+  /** Class behind the limits, if there is one. */
   readonly designation?: string | null;
 }
 
@@ -26,7 +30,7 @@ export interface MaxMin {
  *   it otherwise, and the basis says so)
  * @returns frozen limits in the unit of the nominal
  * @throws `LIMITS_UPSIDE_DOWN` where max is below min, `LIMITS_INVALID`, `LENGTH_INVALID`, and what
- *   {@link readLength} throws for a text
+ *   `readLength` throws for a text
  * @example
  * ```ts
  * import { inch, limitsFromMaxMin } from "limitsmith";

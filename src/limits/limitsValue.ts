@@ -19,6 +19,7 @@ export interface Limits {
   readonly mean: Length;
   /** Tolerance class or fit class behind the limits, such as `"m6"`; `null` where there is none. */
   readonly designation: string | null;
+  /** Where the numbers come from. */
   readonly basis: Basis;
 }
 
@@ -28,20 +29,32 @@ export interface Limits {
  * are present, must agree with them.
  */
 export interface LimitsLike {
+  /** Nominal size. */
   readonly nominal: LengthLike;
+  /** Upper limit deviation, signed. */
   readonly upperDeviation: LengthLike;
+  /** Lower limit deviation, signed. */
   readonly lowerDeviation: LengthLike;
+  /** Upper limit of size; must agree with nominal and deviation. */
   readonly max?: LengthLike;
+  /** Lower limit of size; must agree with nominal and deviation. */
   readonly min?: LengthLike;
+  /** Must be `max - min`. */
   readonly tolerance?: LengthLike;
+  /** Must be the middle of the limits. */
   readonly mean?: LengthLike;
+  /** Class behind the limits, if there is one. */
   readonly designation?: string | null;
+  /** Where the numbers come from. */
   readonly basis?: readonly BasisStep[];
 }
 
 /** A size with one limit only, such as `R .015 MAX`: the other side is for the function to bound. */
 export interface SingleLimit {
+  /** Which limit is given. */
   readonly kind: "max" | "min";
+  /** The limit of size. */
   readonly limit: Length;
+  /** Where the number comes from. */
   readonly basis: Basis;
 }

@@ -1,6 +1,9 @@
 import type { Basis, Caution } from "../basis.js";
 import { lengthOfTicks } from "../units/index.js";
-import type { Fit, FitKind, FitSystem } from "./fitValue.js";
+import type { DeviationSet } from "./deviationSet.js";
+import { fitClearances } from "./fitClearances.js";
+import type { FitClearances } from "./fitClearances.js";
+import type { Fit } from "./fitValue.js";
 import type { Limits } from "./limitsValue.js";
 
 const NO_CAUTIONS: readonly Caution[] = Object.freeze([]);
@@ -29,6 +32,7 @@ const FIT_BASIS: Basis = Object.freeze([
  * @param hole - limits of the hole, any unit
  * @param shaft - limits of the shaft, any unit
  * @param cautions - what to add to the cautions of the fit itself
+ * @param clearances - what {@link fitClearances} gives for the two, where it is at hand
  * @returns the frozen fit; clearances in the unit of the hole's tolerance, signed
  * @throws `LENGTH_OUT_OF_RANGE`
  * @example
@@ -41,23 +45,26 @@ const FIT_BASIS: Basis = Object.freeze([
  * ```
  * @reference ISO 286-1:2010, 3.3 (clearance, interference and transition fit, extreme clearances)
  */
-export function makeFit(hole: Limits, shaft: Limits, cautions: readonly Caution[] = NO_CAUTIONS): Fit {
-  const unit = hole.tolerance.unit;
-  const most = hole.max.ticks - shaft.min.ticks;
-  const least = hole.min.ticks - shaft.max.ticks;
-  const kind: FitKind = least >= 0 ? "clearance" : most <= 0 ? "interference" : "transition";
+export function makeFit(
+  hole: Limits,
+  shaft: Limits,
+  cautions: readonly Caution[] = NO_CAUTIONS,
+  clearances: FitClearances = fitClearances(deviationsOf(hole, hole), deviationsOf(shaft, hole)),
+): Fit {
+  const { kind } = clearances;
   const own = kind === "clearance" ? NO_CAUTIONS : PRESS_CAUTIONS;
+  // written out: spreading one object into another costs more than all the rest
   return Object.freeze({
     hole,
     shaft,
     nominal: hole.nominal,
     kind,
-    system: systemOf(hole, shaft),
-    maxClearance: lengthOfTicks(most, unit),
-    minClearance: lengthOfTicks(least, unit),
-    maxInterference: lengthOfTicks(-least, unit),
-    minInterference: lengthOfTicks(-most, unit),
-    variation: lengthOfTicks(most - least, unit),
+    system: clearances.system,
+    maxClearance: clearances.maxClearance,
+    minClearance: clearances.minClearance,
+    maxInterference: clearances.maxInterference,
+    minInterference: clearances.minInterference,
+    variation: clearances.variation,
     designation:
       hole.designation === null || shaft.designation === null ? null : `${hole.designation}/${shaft.designation}`,
     basis: FIT_BASIS,
@@ -65,9 +72,16 @@ export function makeFit(hole: Limits, shaft: Limits, cautions: readonly Caution[
   });
 }
 
-function systemOf(hole: Limits, shaft: Limits): FitSystem {
-  const holeBasis = hole.lowerDeviation.ticks === 0;
-  const shaftBasis = shaft.upperDeviation.ticks === 0;
-  if (holeBasis && shaftBasis) return "hole and shaft basis";
-  return holeBasis ? "hole basis" : shaftBasis ? "shaft basis" : "neither";
+/** Deviations of limits counted from the nominal of the hole: two limit dimensions need not share theirs. */
+function deviationsOf(limits: Limits, hole: Limits): DeviationSet {
+  const { upperDeviation, lowerDeviation, nominal, tolerance, designation, basis } = limits;
+  const offset = nominal.ticks - hole.nominal.ticks;
+  if (offset === 0) return { upper: upperDeviation, lower: lowerDeviation, tolerance, designation, basis };
+  return {
+    upper: lengthOfTicks(upperDeviation.ticks + offset, upperDeviation.unit),
+    lower: lengthOfTicks(lowerDeviation.ticks + offset, lowerDeviation.unit),
+    tolerance,
+    designation,
+    basis,
+  };
 }

@@ -1,11 +1,11 @@
 import type { Basis } from "../basis.js";
-import { LimitsError } from "../errors.js";
-import { lengthOfTicks } from "../units/index.js";
 import type { Length } from "../units/index.js";
+import { deviationSet } from "./deviationSet.js";
+import { limitsAt } from "./limitsAt.js";
 import type { Limits } from "./limitsValue.js";
 
 /**
- * Builds limits from lengths that are already lengths: the one place where a {@link Limits} comes into being.
+ * Builds limits from lengths that are already lengths.
  *
  * @param nominal - nominal size, any unit
  * @param upperDeviation - upper limit deviation, any unit
@@ -29,31 +29,5 @@ export function makeLimits(
   basis: Basis,
   designation: string | null,
 ): Limits {
-  const { ticks, unit } = nominal;
-  const upper = upperDeviation.ticks;
-  const lower = lowerDeviation.ticks;
-  if (upper < lower) {
-    throw new LimitsError("LIMITS_UPSIDE_DOWN", "the upper limit lies below the lower one", {
-      value: `${upperDeviation.toString()} / ${lowerDeviation.toString()}`,
-      allowed: "an upper deviation that is not less than the lower one",
-    });
-  }
-  return Object.freeze({
-    nominal,
-    upperDeviation,
-    lowerDeviation,
-    max: lengthOfTicks(ticks + upper, unit),
-    min: lengthOfTicks(ticks + lower, unit),
-    tolerance: lengthOfTicks(upper - lower, upperDeviation.unit),
-    mean: lengthOfTicks(ticks + evenHalf(upper + lower, ticks), unit),
-    designation,
-    basis,
-  });
-}
-
-/** Half of a sum of ticks, such that `offset` plus the half is even where the sum is odd. */
-function evenHalf(sum: number, offset: number): number {
-  const below = Math.floor(sum / 2);
-  if (sum % 2 === 0) return below;
-  return (offset + below) % 2 === 0 ? below : below + 1;
+  return limitsAt(nominal, deviationSet(upperDeviation, lowerDeviation, basis, designation));
 }

@@ -11,7 +11,7 @@ import type { Limits } from "./limitsValue.js";
  * @param deviation - the signed deviation, any unit: above zero it is the upper one, below zero the lower one
  * @param options - `basis` and `designation` where you know them
  * @returns frozen limits in the nominal's unit
- * @throws `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { mm, oneSidedLimits, um } from "limitsmith";

@@ -1,18 +1,21 @@
-import { LimitsError } from "../errors.js";
-import { asLength, subtract } from "../units/index.js";
 import type { LengthLike } from "../units/index.js";
-import { ownValue } from "../ownValue.js";
+import { wantedTicks } from "./wantedTicks.js";
 
 /** The clearance that is wanted, both ends signed: negative is interference. */
 export interface WantedClearance {
+  /** Least clearance that is wanted. */
   readonly min: LengthLike;
+  /** Most clearance that is wanted; not under the least. */
   readonly max: LengthLike;
 }
 
 /** A fit that might serve: its extreme clearances in ticks, and what the ranking asks of it. */
 export interface FitCandidate {
+  /** Such as `"H7/m6"`; the last word among equals. */
   readonly designation: string;
+  /** Min clearance in ticks of 0.1 nm, signed. */
   readonly minClearanceTicks: number;
+  /** Max clearance in ticks of 0.1 nm, signed. */
   readonly maxClearanceTicks: number;
   /** Preference, 0 first: for instance preferred fits of a standard before all others. */
   readonly tier: number;
@@ -57,31 +60,9 @@ export function rankFits<Candidate extends FitCandidate>(
           width(right) - width(left) ||
           offset(left, middle) - offset(right, middle) ||
           left.system - right.system ||
-          (left.designation < right.designation ? -1 : left.designation > right.designation ? 1 : 0),
+          compareNames(left.designation, right.designation),
       ),
   );
-}
-
-function wantedTicks(wanted: WantedClearance): { min: number; max: number } {
-  const given: unknown = wanted;
-  const least = typeof given === "object" && given !== null ? ownValue(wanted, "min") : undefined;
-  const most = typeof given === "object" && given !== null ? ownValue(wanted, "max") : undefined;
-  if (least === undefined || most === undefined) {
-    throw new LimitsError("LIMITS_INVALID", "the wanted clearance has a min and a max", {
-      value: given,
-      allowed: "{ min, max }, each a length with its unit; negative is interference",
-      path: ["clearance"],
-    });
-  }
-  const min = asLength(least, ["clearance", "min"]);
-  const max = asLength(most, ["clearance", "max"]);
-  if (subtract(max, min).ticks < 0) {
-    throw new LimitsError("LIMITS_UPSIDE_DOWN", "the wanted max clearance lies below the min", {
-      value: `${min.toString()} to ${max.toString()}`,
-      path: ["clearance"],
-    });
-  }
-  return { min: min.ticks, max: max.ticks };
 }
 
 function width(one: FitCandidate): number {
@@ -90,4 +71,9 @@ function width(one: FitCandidate): number {
 
 function offset(one: FitCandidate, middle: number): number {
   return Math.abs(one.maxClearanceTicks + one.minClearanceTicks - middle);
+}
+
+/** By code units, the same in every language; numbers as they are written. */
+export function compareNames(left: string, right: string): number {
+  return left < right ? -1 : left > right ? 1 : 0;
 }

@@ -13,7 +13,7 @@ import type { SingleLimit } from "./limitsValue.js";
  * @param limit - the limit of size, any unit
  * @param basis - where it comes from; "the caller" unless said otherwise
  * @returns the frozen single limit, in its own unit
- * @throws `LIMITS_INVALID` for another kind, `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `LIMITS_INVALID` for another kind, `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { inch, singleLimit } from "limitsmith";

@@ -12,7 +12,7 @@ import type { Limits } from "./limitsValue.js";
  * @param deviation - the ± value, any unit, not negative
  * @param options - `basis` and `designation` where you know them
  * @returns frozen limits in the nominal's unit
- * @throws `LIMITS_UPSIDE_DOWN` for a negative deviation, `LENGTH_INVALID`, and what {@link readLength} throws
+ * @throws `LIMITS_UPSIDE_DOWN` for a negative deviation, `LENGTH_INVALID`, and what `readLength` throws
  * @example
  * ```ts
  * import { inch, symmetricLimits, thou } from "limitsmith";

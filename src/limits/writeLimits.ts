@@ -34,16 +34,19 @@ export interface WriteLimitsStyle {
   readonly rounding?: LimitsRounding;
   /** `"inch"` for inch units and `"metric"` for the others unless said otherwise. */
   readonly numbers?: NumberStyle;
+  /** The decimal mark; `"."` unless said otherwise. */
   readonly decimalMark?: DecimalMark;
 }
 
 /** Limits as text, and what writing them has cost. */
 export interface WrittenLimits {
+  /** The limits in one line. */
   readonly text: string;
   /** The same in the lines that a drawing stacks; one line where nothing is stacked. */
   readonly lines: readonly string[];
   /** True where the text says exactly the limits. */
   readonly exact: boolean;
+  /** How they were rounded where the text is not exact. */
   readonly rounding: LimitsRounding;
   /** Written max minus exact max: negative where part of the tolerance was given up there. */
   readonly maxShift: Length;

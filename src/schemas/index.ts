@@ -1,2 +1,11 @@
 export { sheetJsonSchema, sheetSchema } from "../sheet/index.js";
-export type { FeatureSpec, SheetSpec, TitleBlockFields } from "../sheet/index.js";
+export type {
+  FeatureBase,
+  FeatureSpec,
+  KeyseatFeatureSpec,
+  KeyseatFields,
+  SheetSpec,
+  SizeFeatureSpec,
+  TitleBlockFields,
+  TitleBlockLineFields,
+} from "../sheet/index.js";

@@ -1,5 +1,23 @@
 export { resolveSheet } from "./resolveSheet.js";
 export { sheetJsonSchema } from "./sheetJsonSchema.js";
 export { sheetSchema } from "./sheetSchema.js";
-export type { FeatureSpec, SheetSpec, TitleBlockFields } from "./sheetSpec.js";
-export type { ResolvedSheet, SheetCounts, SheetFit, SheetRow } from "./sheetValue.js";
+export type {
+  FeatureBase,
+  FeatureSpec,
+  KeyseatFeatureSpec,
+  KeyseatFields,
+  SheetSpec,
+  SizeFeatureSpec,
+  TitleBlockFields,
+  TitleBlockLineFields,
+} from "./sheetSpec.js";
+export type {
+  ResolvedKeyseat,
+  ResolvedSheet,
+  SheetCounts,
+  SheetFinding,
+  SheetFit,
+  SheetRow,
+  SheetRowBase,
+  SheetSurface,
+} from "./sheetValue.js";

@@ -1,5 +1,6 @@
+import { hasOwn } from "../ownValue.js";
 import { schemas } from "./buildSchemas.js";
-import type { FeatureSpec, SheetSpec } from "./sheetSpec.js";
+import type { FeatureSpec, KeyseatFeatureSpec, SheetSpec, SizeFeatureSpec } from "./sheetSpec.js";
 
 /** A place in the data, as keys. */
 export type DataPath = readonly (string | number)[];
@@ -37,7 +38,8 @@ export function readFrame(data: unknown): ReadResult<SheetFrame> {
 
 /** Reads one feature; unknown keys are gathered, not refused. */
 export function readFeature(data: unknown): ReadResult<FeatureSpec> {
-  return read<FeatureSpec>(schemas().feature, data);
+  const isKeyseat = typeof data === "object" && data !== null && hasOwn(data, "keyseat");
+  return isKeyseat ? read<KeyseatFeatureSpec>(schemas().keyseat, data) : read<SizeFeatureSpec>(schemas().size, data);
 }
 
 function read<T>(schema: Schema, data: unknown): ReadResult<T> {

@@ -20,7 +20,7 @@ export function resolveMates(read: readonly ReadRow[]): readonly SheetFit[] {
   const done = new Set<string>();
   const fits: SheetFit[] = [];
   for (const { spec, row } of read) {
-    if (spec?.mate === undefined) continue;
+    if (spec === null || !("callout" in spec) || spec.mate === undefined) continue;
     const { id, mate } = spec;
     const pair = JSON.stringify([id, mate].sort());
     if (done.has(pair)) continue;
@@ -31,11 +31,11 @@ export function resolveMates(read: readonly ReadRow[]): readonly SheetFit[] {
 }
 
 function memberOf({ row }: ReadRow, id: string): Member {
-  const resolved = row.ok ? row.resolved : null;
+  const resolved = row.ok && row.resolved.outcome === "limits" ? row.resolved : null;
   return {
     id,
     kind: row.kind,
-    limits: resolved?.outcome === "limits" ? resolved.limits : null,
+    limits: resolved?.limits ?? null,
     hasNominal: resolved?.request.kind !== "limits",
   };
 }

@@ -5,15 +5,18 @@ import type { LimitsProblem } from "../errors.js";
 import { parseToleranceClass } from "../iso286/index.js";
 import { atPath } from "../located.js";
 import { titleBlock } from "../titleBlock/index.js";
-import type { TitleBlock } from "../titleBlock/index.js";
 import { countSheet } from "./countSheet.js";
 import { ownCopy } from "./ownCopy.js";
+import { findingsOfSurface } from "./findingsOfSurface.js";
 import { readFeature, readFrame } from "./readFrame.js";
 import type { DataPath, SheetFrame } from "./readFrame.js";
 import type { ReadRow } from "./readRow.js";
 import { resolveMates } from "./resolveMates.js";
+import { findingsOfKeyseat, resolveKeyseat } from "./resolveKeyseat.js";
 import type { FeatureSpec } from "./sheetSpec.js";
-import type { ResolvedSheet, SheetRow } from "./sheetValue.js";
+import type { ResolvedSheet, SheetFinding, SheetRow, SheetRowBase } from "./sheetValue.js";
+import { readFinish, surfaceOf } from "./surfaceOf.js";
+import type { FinishContext } from "./surfaceOf.js";
 
 /**
  * Resolves a whole drawing: limits for each feature, fits for the mates.
@@ -57,54 +60,65 @@ export function resolveSheet(json: unknown): ResolvedSheet {
       path: frame.fault.path,
     });
   }
+  const problems: LimitsProblem[] = [];
+  const sheet = sheetContext(frame.value, problems);
   const unknownKeys: DataPath[] = [...frame.unknownKeys];
-  const block = attempt(() => blockOf(frame.value));
-  const context = contextOf(frame.value, block.ok ? block.value : null);
   const seen = new Set<string>();
   const read = frame.value.features.map((feature, index): ReadRow => {
     const result = readFeature(feature);
     unknownKeys.push(...result.unknownKeys.map((path) => ["features", index, ...path]));
     if (!result.ok) return faultyRow(feature, index, result.fault);
-    return { spec: result.value, row: rowOf(result.value, index, seen, context, block.ok ? null : block.error) };
+    return { spec: result.value, row: rowOf(result.value, index, seen, sheet, problems) };
   });
-  const rows = read.map(({ row }) => row);
+  const rows = withKeyseats(read, sheet.callouts);
   const fits = resolveMates(read);
   return Object.freeze({
     drawing: frame.value.drawing,
     unit: frame.value.unit,
     rows: Object.freeze(rows),
     fits,
-    problems: Object.freeze(block.ok ? [] : [block.error]),
+    findings: Object.freeze(rows.flatMap(findingsOfRow)),
+    problems: Object.freeze(problems),
     unknownKeys: Object.freeze(unknownKeys.map((path) => Object.freeze([...path]))),
     counts: countSheet(rows, fits),
   });
 }
 
-function blockOf(frame: SheetFrame): TitleBlock | null {
-  const { unit, decimalMark = ".", titleBlock: fields } = frame;
-  if (fields === undefined) return null;
-  return atPath(["titleBlock"], () => titleBlock({ unit, decimalMark, ...fields }));
+/** What all rows of one drawing share. */
+interface SheetContext {
+  readonly callouts: CalloutContext;
+  readonly finishes: FinishContext;
+  /** Why the title block cannot be used; `null` where it can, or there is none. */
+  readonly blockError: LimitsProblem | null;
 }
 
-function contextOf(frame: SheetFrame, block: TitleBlock | null): CalloutContext {
-  const { unit, decimalMark = "." } = frame;
-  return { unit, decimalMark, ...(block === null ? {} : { titleBlock: block }) };
+function sheetContext(frame: SheetFrame, problems: LimitsProblem[]): SheetContext {
+  const { unit, decimalMark = ".", titleBlock: fields } = frame;
+  const block = attempt(() =>
+    fields === undefined ? null : atPath(["titleBlock"], () => titleBlock({ unit, decimalMark, ...fields })),
+  );
+  if (!block.ok) problems.push(block.error);
+  const text = fields?.finish;
+  const allOver = attempt(() =>
+    text === undefined ? null : atPath(["titleBlock", "finish"], () => readFinish(text, { unit, decimalMark })),
+  );
+  if (!allOver.ok) problems.push(allOver.error);
+  const used = block.ok ? block.value : null;
+  return {
+    callouts: { unit, decimalMark, ...(used === null ? {} : { titleBlock: used }) },
+    finishes: { unit, decimalMark, allOver: allOver.ok ? allOver.value : null },
+    blockError: block.ok ? null : block.error,
+  };
 }
 
 function rowOf(
   spec: FeatureSpec,
   index: number,
   seen: Set<string>,
-  context: CalloutContext,
-  blockError: LimitsProblem | null,
+  sheet: SheetContext,
+  problems: LimitsProblem[],
 ): SheetRow {
-  const base = {
-    index,
-    id: spec.id,
-    name: spec.name ?? null,
-    callout: spec.callout,
-    kind: spec.kind ?? null,
-  };
+  const base = baseOf(spec, index);
   if (seen.has(spec.id)) {
     const error = new LimitsError("FEATURE_ID_REPEATED", "another feature before has this id", {
       value: spec.id,
@@ -114,21 +128,70 @@ function rowOf(
     return Object.freeze({ ...base, ok: false as const, error: error.toJSON() });
   }
   seen.add(spec.id);
+  // worked out when all features that it may stand on are
+  if ("keyseat" in spec) return Object.freeze({ ...base, ok: false as const, error: WAITING });
   const resolved = attempt(() =>
     atPath(["features", index, "callout"], () =>
-      resolveCallout(spec.callout, spec.kind === undefined ? context : { ...context, feature: spec.kind }),
+      resolveCallout(spec.callout, spec.kind === undefined ? sheet.callouts : { ...sheet.callouts, feature: spec.kind }),
     ),
   );
+  // the finish all over is for sizes; an angle or a reference dimension has no surface of its own
+  const sized = resolved.ok && (resolved.value.outcome === "limits" || resolved.value.outcome === "fit");
+  const finishes = sized ? sheet.finishes : { ...sheet.finishes, allOver: null };
+  const surface = surfaceOf(spec, index, finishes, problems);
   if (resolved.ok) {
-    return Object.freeze({ ...base, kind: base.kind ?? kindOf(resolved.value), ok: true as const, resolved: resolved.value });
+    const { value } = resolved;
+    return Object.freeze({ ...base, kind: base.kind ?? kindOf(value), ok: true as const, resolved: value, surface });
   }
   // the size would have fallen to the block: its fault is the row's fault
-  const error = resolved.error.code === "TITLE_BLOCK_MISSING" && blockError !== null ? blockError : resolved.error;
-  return Object.freeze({ ...base, ok: false as const, error });
+  const missing = resolved.error.code === "TITLE_BLOCK_MISSING" && sheet.blockError !== null;
+  return Object.freeze({ ...base, ok: false as const, error: missing ? sheet.blockError : resolved.error });
+}
+
+const WAITING: LimitsProblem = new LimitsError("KEYSEAT_ON_UNKNOWN", "the keyseat was not worked out").toJSON();
+
+/** The rows again, with the keyseats worked out from the features that they are cut into. */
+function withKeyseats(read: readonly ReadRow[], callouts: CalloutContext): readonly SheetRow[] {
+  const byId = new Map<string, SheetRow>();
+  for (const { row } of read) if (row.id !== null && !byId.has(row.id)) byId.set(row.id, row);
+  return read.map(({ row, spec }) => {
+    if (spec === null || !("keyseat" in spec) || row.ok || row.error !== WAITING) return row;
+    const { keyseat, id } = spec;
+    const done = attempt(() =>
+      atPath(["features", row.index, "keyseat"], () => resolveKeyseat(keyseat, byId, callouts)),
+    );
+    const base = baseOf({ ...spec, id }, row.index);
+    return done.ok
+      ? Object.freeze({ ...base, ok: true as const, resolved: done.value, surface: null })
+      : Object.freeze({ ...base, ok: false as const, error: done.error });
+  });
+}
+
+function findingsOfRow(row: SheetRow): readonly SheetFinding[] {
+  if (!row.ok || row.id === null) return [];
+  return row.resolved.outcome === "keyseat" ? findingsOfKeyseat(row.id, row.resolved) : findingsOfSurface(row);
+}
+
+function baseOf(spec: FeatureSpec, index: number): SheetRowBase {
+  const sized = "callout" in spec ? spec : null;
+  return {
+    index,
+    id: spec.id,
+    name: spec.name ?? null,
+    callout: sized?.callout ?? null,
+    kind: sized?.kind ?? null,
+  };
 }
 
 function kindOf({ request }: ResolvedCallout): "hole" | "shaft" | null {
-  return request.kind === "class" ? parseToleranceClass(request.toleranceClass).kind : null;
+  switch (request.kind) {
+    case "class":
+      return parseToleranceClass(request.toleranceClass).kind;
+    case "inch class":
+      return request.member;
+    default:
+      return null;
+  }
 }
 
 function faultyRow(feature: unknown, index: number, fault: { readonly path: DataPath; readonly says: string }): ReadRow {
@@ -138,7 +201,7 @@ function faultyRow(feature: unknown, index: number, fault: { readonly path: Data
   };
   const error = new LimitsError("FEATURE_INVALID", fault.says, {
     value: valueAt(feature, fault.path),
-    allowed: "a feature: { id, callout, name?, kind?, mate?, note? }",
+    allowed: "a feature: { id, callout, … } or { id, keyseat, … }",
     path: ["features", index, ...fault.path],
   });
   return {

@@ -1,10 +1,35 @@
 import type { ResolvedCallout } from "../callout/index.js";
 import type { LimitsProblem } from "../errors.js";
-import type { Fit } from "../limits/index.js";
+import type { Roughness } from "../finish/index.js";
+import type { KeyseatRows } from "../keys/index.js";
+import type { Fit, Limits } from "../limits/index.js";
 import type { LengthUnit } from "../units/index.js";
 
+/** A keyseat worked out: its control dimension and width by the standard, and what the drawing prints. */
+export interface ResolvedKeyseat {
+  readonly outcome: "keyseat";
+  /** Id of the shaft or bore that it is cut into. */
+  readonly on: string;
+  /** S or T (d - t1, d + t2) and the width, by the standard. */
+  readonly seat: KeyseatRows;
+  /** What the drawing prints for them; `null` where it prints none. */
+  readonly printed: { readonly control: Limits | null; readonly width: Limits | null };
+}
+
+/** The surface of a feature, as far as the drawing says. */
+export interface SheetSurface {
+  /** `null` where neither feature nor title block says one that can be read. */
+  readonly finish: Roughness | null;
+  /** Where the finish stands; `null` where there is none. */
+  readonly from: "feature" | "title block" | null;
+  /** Trade name of the process; `null` where none is said. */
+  readonly process: string | null;
+  /** Function of the surface; `null` where none is said. */
+  readonly function: string | null;
+}
+
 /** What every row has, whether it was resolved or not; `null` where the feature did not say. */
-interface RowBase {
+export interface SheetRowBase {
   /** Place in the drawing file, from 0. */
   readonly index: number;
   readonly id: string | null;
@@ -15,15 +40,37 @@ interface RowBase {
 
 /** One feature of the drawing: its limits, or why there are none. */
 export type SheetRow =
-  | (RowBase & { readonly ok: true; readonly resolved: ResolvedCallout })
-  | (RowBase & { readonly ok: false; readonly error: LimitsProblem });
+  | (SheetRowBase & {
+      readonly ok: true;
+      readonly resolved: ResolvedCallout | ResolvedKeyseat;
+      /** `null` where nothing is said of it. */
+      readonly surface: SheetSurface | null;
+    })
+  | (SheetRowBase & { readonly ok: false; readonly error: LimitsProblem });
 
 /** Two features that go together, told by their ids. */
 export type SheetFit =
   | { readonly ok: true; readonly hole: string; readonly shaft: string; readonly fit: Fit }
   | { readonly ok: false; readonly features: readonly [string, string]; readonly error: LimitsProblem };
 
-/** How many of what; `features` is the sum of the next five. */
+/** Something that the drawing says against itself or against good practice, and a checker would mark. */
+export interface SheetFinding {
+  /** Stable code; never changes its meaning. */
+  readonly code: string;
+  /** `"error"`: the drawing contradicts itself or a standard it names; `"warning"`: it may not work; `"note"`: look. */
+  readonly severity: "error" | "warning" | "note";
+  /** Ids of the features that it rests on. */
+  readonly features: readonly string[];
+  readonly says: string;
+  /** What the drawing has, where two values disagree. */
+  readonly found: string | null;
+  /** What it is held against. */
+  readonly expected: string | null;
+  /** What would settle it. */
+  readonly settle: string;
+}
+
+/** How many of what; `features` is the sum of the next eight. */
 export interface SheetCounts {
   readonly features: number;
   /** Rows with limits. */
@@ -34,7 +81,11 @@ export interface SheetCounts {
   readonly singleLimits: number;
   /** Rows with limits of an angle. */
   readonly angles: number;
-  /** Reference and basic dimensions. */
+  /** Rows with limits of a chamfer's length and angle. */
+  readonly chamfers: number;
+  /** Rows with the dimensions of a keyseat. */
+  readonly keyseats: number;
+  /** Reference and basic dimensions, and threads. */
   readonly withoutLimits: number;
   /** Rows with an error. */
   readonly failed: number;
@@ -51,7 +102,9 @@ export interface ResolvedSheet {
   /** One row a feature, in the order of the drawing file. */
   readonly rows: readonly SheetRow[];
   readonly fits: readonly SheetFit[];
-  /** Errors that belong to the drawing and not to one row: its title block. */
+  /** What a checker would mark, in the order of the rows. */
+  readonly findings: readonly SheetFinding[];
+  /** Errors that cost no row its limits: in the title block, or in what is said of a finish. */
   readonly problems: readonly LimitsProblem[];
   /** Keys of the file that mean nothing here, as paths; they were passed over. */
   readonly unknownKeys: readonly (readonly (string | number)[])[];

@@ -8,6 +8,7 @@ export type AngleStyle = "decimal" | "dms";
 export interface AngleData {
   /** Whole number of millionths of an arc second; one degree is 3 600 000 000. */
   readonly microarcseconds: number;
+  /** How the angle was written; for display only. */
   readonly style: AngleStyle;
 }
 
@@ -17,6 +18,7 @@ export interface Angle extends AngleData {
   toDegrees(): number;
   /** Exact text in decimal degrees or, where those do not end, in degrees, minutes and seconds. */
   toString(): string;
+  /** The same text: JSON holds an angle so, and every function reads it back. */
   toJSON(): string;
 }
 
@@ -75,7 +77,7 @@ export function angleOfMicroarcseconds(microarcseconds: number, style: AngleStyl
 }
 
 function angleText(microarcseconds: number, style: AngleStyle): string {
-  // a degree is 2^11 * 3^2 * 5^8 * ... units: decimals end only where the nines are used up
+  // a degree is 2^10 * 3^2 * 5^8 units: decimals end only where the threes are used up
   const scaled = BigInt(microarcseconds) * 10n ** 11n;
   if (style === "decimal" && scaled % BigInt(PER_DEGREE) === 0n) {
     return `${scaledText(scaled / BigInt(PER_DEGREE), 11)}°`;

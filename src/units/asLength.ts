@@ -1,10 +1,9 @@
 import { atPath } from "../located.js";
 import { LimitsError } from "../errors.js";
+import { hasOwn } from "../ownValue.js";
 import { isMadeLength, lengthOfTicks } from "./length.js";
 import type { Length, LengthLike } from "./length.js";
 import { readLength } from "./readLength.js";
-
-const { hasOwn } = Object;
 
 /**
  * Takes a length in any shape it can travel in and gives a {@link Length} with its methods.

@@ -30,6 +30,8 @@ export interface Length extends LengthData {
 export type LengthLike = LengthData | string;
 
 class LengthValue implements Length {
+  // a brand that cannot be copied: a prototype alone makes no length
+  readonly #made = true;
   readonly ticks: number;
   readonly unit: LengthUnit;
 
@@ -37,6 +39,10 @@ class LengthValue implements Length {
     this.ticks = ticks;
     this.unit = unit;
     Object.freeze(this);
+  }
+
+  static made(value: object): value is LengthValue {
+    return #made in value;
   }
 
   to(unit: LengthUnit): number {
@@ -81,5 +87,5 @@ export function lengthOfTicks(ticks: number, unit: LengthUnit): Length {
 
 /** True for a value made by {@link lengthOfTicks}; saves a copy, decides nothing. */
 export function isMadeLength(value: LengthData): value is Length {
-  return value instanceof LengthValue;
+  return LengthValue.made(value);
 }

@@ -1,15 +1,13 @@
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
+import { decimalText } from "./decimalText.js";
+import type { DecimalLike } from "./decimalText.js";
 import { lengthOfTicks } from "./length.js";
 import type { Length, LengthUnit } from "./length.js";
+import { lengthText } from "./lengthText.js";
 import { readNumber } from "./readNumber.js";
 import type { DecimalMark, WrittenNumber } from "./readNumber.js";
 import { ticksPerUnit } from "./ticksPerUnit.js";
-
-/** A decimal object of any decimal library: known by how it writes itself, not by its class. */
-export interface DecimalLike {
-  toFixed(): string;
-}
 
 /** What a unit function takes: a number (rounded to the nearest tick), a text or a decimal (both exact). */
 export type LengthSource = number | string | DecimalLike;
@@ -24,7 +22,10 @@ export interface ReadOptions {
 export function lengthFrom(value: LengthSource, unit: LengthUnit, options?: ReadOptions): Length {
   if (typeof value === "number") return fromDouble(value, unit);
   const decimalMark = typeof value === "string" ? decimalMarkOf(options) : ".";
-  const text = typeof value === "string" ? value.trim() : decimalText(value);
+  const text = typeof value === "string" ? lengthText(value) : decimalText(value);
+  if (typeof value !== "string" && /^-?(?:NaN|Infinity)$/.test(text)) {
+    throw new LimitsError("NUMBER_NOT_FINITE", "a length must be a finite number", { value: text });
+  }
   const read = readNumber(text, decimalMark);
   return lengthOfNumber(read, unit, text);
 }
@@ -63,23 +64,4 @@ function fromDouble(value: number, unit: LengthUnit): Length {
   // a half tick goes away from zero, alike on both sides
   const ticks = Math.round(Math.abs(value) * ticksPerUnit(unit));
   return lengthOfTicks(value < 0 ? -ticks : ticks, unit);
-}
-
-function decimalText(value: unknown): string {
-  // a boxed number has a toFixed too, but one that drops its decimals
-  const text: unknown =
-    typeof value === "object" &&
-    value !== null &&
-    typeof value.valueOf() !== "number" &&
-    "toFixed" in value &&
-    typeof value.toFixed === "function"
-      ? (value as DecimalLike).toFixed()
-      : undefined;
-  if (typeof text !== "string") {
-    throw new LimitsError("NUMBER_MALFORMED", "a length is made from a number, a text or a decimal", { value });
-  }
-  if (text === "NaN" || text.endsWith("Infinity")) {
-    throw new LimitsError("NUMBER_NOT_FINITE", "a length must be a finite number", { value: text });
-  }
-  return text;
 }

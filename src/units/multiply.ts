@@ -1,4 +1,5 @@
 import { LimitsError } from "../errors.js";
+import { hasOwn } from "../ownValue.js";
 import { asLength } from "./asLength.js";
 import { divideRounded } from "./divideRounded.js";
 import { lengthOfTicks } from "./length.js";
@@ -6,6 +7,7 @@ import type { Length, LengthLike } from "./length.js";
 
 /** A ratio of two whole numbers. */
 export interface Ratio {
+  /** Any whole number. */
   readonly numerator: number;
   /** Over zero. */
   readonly denominator: number;
@@ -47,7 +49,7 @@ function isRatio(value: unknown): value is Ratio {
   return (
     typeof value === "object" &&
     value !== null &&
-    Object.hasOwn(value, "numerator") &&
-    Object.hasOwn(value, "denominator")
+    hasOwn(value, "numerator") &&
+    hasOwn(value, "denominator")
   );
 }

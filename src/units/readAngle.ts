@@ -6,7 +6,7 @@ import { decimalMarkOf } from "./lengthFrom.js";
 import type { ReadOptions } from "./lengthFrom.js";
 
 const LONGEST_ANGLE_TEXT = 60;
-const ANGLE = /^([+\-\u2212]?)(\d{1,7})(?:\.(\d{0,12}))?\s?(?:°|deg)(?:\s?(\d{1,2})\s?['′])?(?:\s?(\d{1,2})(?:\.(\d{0,6}))?\s?["″])?$/i;
+const ANGLE = /^([+\-\u2212]?)(?=\.?\d)(\d{0,7})(?:\.(\d{0,12}))?\s?(?:°|deg)(?:\s?(\d{1,2})\s?['′])?(?:\s?(\d{1,2})(?:\.(\d{0,6}))?\s?["″])?$/i;
 
 /**
  * Reads an angle from a text with its sign of degree.

@@ -9,9 +9,11 @@ import { splitUnit } from "./splitUnit.js";
 
 /** A size as it stands on a drawing: its exact length, and how it was written. */
 export interface WrittenDimension {
+  /** The exact length, in its unit. */
   readonly length: Length;
   /** The number as it was written, without its unit. */
   readonly text: string;
+  /** Whether it stood as a decimal or as an inch fraction. */
   readonly form: "decimal" | "fraction";
   /** How many decimals were written; 0 for a whole number and for a fraction. */
   readonly places: number;

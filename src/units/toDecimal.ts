@@ -26,6 +26,7 @@ let PrivateDecimal: typeof Decimal | undefined;
  * @reference 1 in = 25.4 mm exactly: the international yard and pound agreement of 1959
  */
 export function toDecimal(length: LengthLike, unit: LengthUnit): Decimal {
-  PrivateDecimal ??= Decimal.clone({ precision: PRECISION, defaults: true });
+  // without a prototype: Decimal would read the other settings from a polluted one
+  PrivateDecimal ??= Decimal.clone(Object.assign(Object.create(null), { precision: PRECISION, defaults: true }) as Decimal.Config);
   return new PrivateDecimal(asLength(length).ticks).div(ticksPerUnit(unit));
 }

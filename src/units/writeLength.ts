@@ -30,6 +30,7 @@ export interface WriteLengthOptions {
   readonly symbol?: boolean;
   /** `"always"` writes a plus before positive numbers; `"negative"` unless said otherwise. */
   readonly sign?: "negative" | "always";
+  /** The decimal mark; `"."` unless said otherwise. */
   readonly decimalMark?: DecimalMark;
 }
 

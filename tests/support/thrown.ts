@@ -1,3 +1,4 @@
+import { inspect } from "node:util";
 import type { LimitsError } from "limitsmith";
 
 /**
@@ -9,9 +10,9 @@ export function thrown(task: () => unknown): LimitsError {
     given = task();
   } catch (error) {
     if (error instanceof Error && error.name === "LimitsError") return error as LimitsError;
-    throw new Error(`not a LimitsError: ${String(error)}`, { cause: error });
+    throw new Error(`not a LimitsError: ${inspect(error)}`, { cause: error });
   }
-  throw new Error(`nothing was thrown; the result was ${JSON.stringify(given)}`);
+  throw new Error(`nothing was thrown; the result was ${inspect(given)}`);
 }
 
 /** The code of the error that a task is refused with. */

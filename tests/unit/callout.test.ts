@@ -22,6 +22,12 @@ function gist(request: CalloutRequest): string {
       return `${request.size.text} ${request.side}`;
     case "angle":
       return request.angle.toString();
+    case "inch class":
+      return `${request.nominal.text} ${request.inchClass} ${request.member ?? ""}`;
+    case "chamfer":
+      return `${request.length.text} ${request.angle.toString()}`;
+    case "thread":
+      return request.designation;
     default:
       return request.nominal.text;
   }
@@ -99,11 +105,11 @@ describe("readCallout", () => {
     ["(3.75]", inch, "CALLOUT_NOT_UNDERSTOOD", [5, 6]],
     ["[2.000 ±.001]", inch, "CALLOUT_NOT_UNDERSTOOD", [7, 8]],
     ["2.000 ±", inch, "CALLOUT_NOT_UNDERSTOOD", [7, 7]],
-    ["2.000 ±.001 ±.002", inch, "CALLOUT_NOT_UNDERSTOOD", [12, 13]],
+    ["2.000 ±.001 ±.002", inch, "CALLOUT_TWO_TOLERANCES", [12, 13]],
     ["2.000 +.001", inch, "CALLOUT_NOT_UNDERSTOOD", [11, 11]],
     ["2.000 .001/-.001", inch, "CALLOUT_NOT_UNDERSTOOD", [6, 10]],
     ["1.250 +.001/+.003", inch, "LIMITS_UPSIDE_DOWN", [6, 17]],
-    ["2\u0000", inch, "CALLOUT_NOT_UNDERSTOOD", [1, 2]],
+    ["2\u0000", inch, "CONTROL_CHARACTER", [1, 2]],
     ["2.188 \u{1F600}", inch, "CALLOUT_NOT_UNDERSTOOD", [6, 7]],
     ["2,188", inch, "DECIMAL_MARK_MIXED", [0, 5]],
     ["1/0", inch, "FRACTION_ZERO_DENOMINATOR", [0, 3]],
@@ -112,8 +118,15 @@ describe("readCallout", () => {
     ["1.000000001", inch, "LENGTH_TOO_FINE", [0, 11]],
     ["25 mm ±.001 in", metric, "CALLOUT_UNIT_CONFLICT", null],
     ["1.5754 in/40.01 mm", inch, "CALLOUT_UNIT_CONFLICT", null],
-    ["95°70'", inch, "ANGLE_INVALID", null],
-    ["45° MAX", inch, "ANGLE_INVALID", null],
+    ["95°70'", inch, "ANGLE_INVALID", [0, 6]],
+    ["45° MAX", inch, "CALLOUT_NOT_UNDERSTOOD", [4, 7]],
+    ["1.250 ±0", inch, "CALLOUT_ZERO_TOLERANCE", [6, 8]],
+    ["1.250/1.250", inch, "CALLOUT_ZERO_TOLERANCE", [0, 11]],
+    ["7 3/8 ±0.5 mm", inch, "CALLOUT_UNIT_CONFLICT", null],
+    ["4x6.5", metric, "CALLOUT_NOT_UNDERSTOOD", [1, 2]],
+    ["0X ⌀5", metric, "CALLOUT_NOT_UNDERSTOOD", [0, 1]],
+    ["⌀6 THRU ↧5", metric, "CALLOUT_NOT_UNDERSTOOD", [0, 10]],
+    ["12 ±0.1 REF", metric, "CALLOUT_NOT_UNDERSTOOD", [8, 11]],
   ])("refuses %j", (text, options, code, position) => {
     const error = thrown(() => readCallout(text, options));
     expect(error.code).toBe(code);
@@ -142,6 +155,29 @@ describe("resolveCallout", () => {
     const shaft = resolveCallout("40 H7/m6", { ...metric, feature: "shaft" });
     expect(limitsOf(shaft)).toBe("40.025 mm 40.009 mm");
     expect(shaft.outcome === "limits" && shaft.fit?.designation).toBe("H7/m6");
+  });
+
+  it("inch fit class: the member that the feature or the text names", () => {
+    // ANSI B4.1-1967, LN2 over 1.19 to 1.97 in: hole +1.0/0, shaft +1.6/+1.0 thou
+    expect(limitsOf(resolveCallout("1.250 LN2 shaft", inch))).toBe("1.2516 in 1.251 in");
+    expect(limitsOf(resolveCallout("1.250 LN2", { ...inch, feature: "shaft" }))).toBe("1.2516 in 1.251 in");
+    expect(limitsOf(resolveCallout("1.250 ln 2", { ...inch, feature: "hole" }))).toBe("1.251 in 1.25 in");
+    // LT2 over 0.40 to 0.71 in: hole +1.0/0, shaft ±0.35; on a shaft basis all four move by -0.35
+    expect(limitsOf(resolveCallout(".625 LT2", { ...inch, feature: "shaft" }))).toBe("0.62535 in 0.62465 in");
+    expect(limitsOf(resolveCallout("⌀.625 LT2S hole", inch))).toBe("0.62565 in 0.62465 in");
+    expect(resolveCallout("1.250 LN2", inch)).toMatchObject({ outcome: "fit", fit: { kind: "interference" } });
+    expect(codeOf(() => resolveCallout("1.250 LN2 hole", { ...inch, feature: "shaft" }))).toBe("CALLOUT_KIND_MISMATCH");
+  });
+
+  it("chamfers, angles with deviations, threads and depths", () => {
+    const chamfer = resolveCallout(".06 X 30°", { titleBlock });
+    expect(chamfer).toMatchObject({ outcome: "chamfer" });
+    expect(chamfer.outcome === "chamfer" && [chamfer.limits.max.toString(), chamfer.angle.min.toString()]).toEqual(["0.07 in", "29°"]);
+    const own = resolveCallout("30° +1°/-0°30'", inch);
+    expect(own.outcome === "angle" && [own.angle.max.toString(), own.angle.min.toString()]).toEqual(["31°", "29.5°"]);
+    expect(resolveCallout("1/4-20 UNC-2B THRU", { titleBlock })).toMatchObject({ outcome: "no limits", depth: null });
+    expect(resolveCallout("1/4-20 UNC-2B ↧.62", { titleBlock }).depth?.min.toString()).toBe("0.61 in");
+    expect(codeOf(() => resolveCallout("⌀.25 ±.01 ↧.62", inch))).toBe("TITLE_BLOCK_MISSING");
   });
 
   it("own tolerances", () => {

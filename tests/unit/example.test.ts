@@ -33,7 +33,7 @@ describe("examples/grain-mill", () => {
     expect(status).toBe(0);
     expect(started).toContain(stdout);
     expect(stdout).toContain("35.018/35.002");
-    expect(stdout).toContain("15 features, 0 failed; 4 fits, 0 failed");
+    expect(stdout).toContain("21 features, 0 failed; 4 fits, 0 failed");
     expect(stdout).toContain("caution:");
   });
 

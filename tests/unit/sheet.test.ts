@@ -29,14 +29,17 @@ describe("resolveSheet", () => {
       { id: "6", callout: "[3.125]" },
       { id: "7", callout: "nothing" },
       { id: "8", callout: "2.063" },
+      { id: "9", callout: ".06 X 45°" },
     ]);
-    expect(sheet.rows.map(({ id }) => id)).toEqual(["1", "2", "3", "4", "5", "6", "7", "8"]);
+    expect(sheet.rows.map(({ id }) => id)).toEqual(["1", "2", "3", "4", "5", "6", "7", "8", "9"]);
     expect(sheet.counts).toEqual({
-      features: 8,
+      features: 9,
       limits: 2,
       fitCallouts: 1,
       singleLimits: 1,
       angles: 1,
+      chamfers: 1,
+      keyseats: 0,
       withoutLimits: 2,
       failed: 1,
       fits: 0,
@@ -229,5 +232,126 @@ describe("the result as data", () => {
       expect(fitOf(boreRow.resolved.limits, seatRow.resolved.limits).kind).toBe("transition");
     }
     expect(JSON.stringify(resolveSheet({ ...drawing, features: [{ id: "S", callout: "⌀28 mm k6" }] }))).not.toContain("NaN");
+  });
+});
+
+describe("keyseats", () => {
+  // ANSI/ASME B17.1-1967: 1 1/8 in shaft, 1/4 in square key: S .986 (+.000/-.015), T 1.241 (+.010/-.000);
+  // Class 2 width 1/4: +.002/-.000 in both members
+  const shaft = { id: "S", callout: "1.125 LC2", kind: "shaft" };
+  const bore = { id: "B", callout: "1.125 LC2", kind: "hole" };
+  const seat = (more: object): object => ({ standard: "B17.1", on: "S", class: 2, ...more });
+
+  function limitsText(row: SheetRow | undefined): string[] {
+    if (row?.ok !== true || row.resolved.outcome !== "keyseat") return [errorOf(row)];
+    return row.resolved.seat.rows.map(({ symbol, limits }) => `${symbol} ${limits?.max.toString() ?? "-"} ${limits?.min.toString() ?? "-"}`);
+  }
+
+  it("S and width in the shaft, T and width in the hub, wherever they stand", () => {
+    const sheet = sheetOf([
+      { id: "K1", keyseat: seat({}) },
+      shaft,
+      bore,
+      { id: "K2", keyseat: seat({ on: "B" }) },
+    ]);
+    expect(limitsText(sheet.rows[0])).toEqual(["S 0.986 in 0.971 in", "W 0.252 in 0.25 in"]);
+    expect(limitsText(sheet.rows[3])).toEqual(["T 1.251 in 1.241 in", "W 0.252 in 0.25 in"]);
+    expect(sheet.counts).toMatchObject({ features: 4, limits: 2, keyseats: 2, failed: 0 });
+    expect(sheet.findings).toEqual([]);
+  });
+
+  it("metric keyways by their own standard", () => {
+    const sheet = sheetOf([
+      { id: "S", callout: "⌀27 mm h6" },
+      { id: "K", keyseat: { standard: "ISO/R 773", on: "S", fit: "normal" } },
+    ]);
+    // ISO/R 773: over 22 to 30: 8 x 7, t1 4 +0.2/0; N9 of 8: 0/-36
+    expect(limitsText(sheet.rows[1])).toEqual(["d - t1 23 mm 22.8 mm", "b 8 mm 7.964 mm"]);
+  });
+
+  it("printed limits that are not the standard's are a finding with both values", () => {
+    const printed = { control: ".986/.976", width: ".252/.250" };
+    const sheet = sheetOf([shaft, { id: "K", keyseat: seat({ printed }) }]);
+    expect(sheet.findings).toMatchObject([
+      {
+        code: "KEYSEAT_NOT_STANDARD",
+        severity: "error",
+        features: ["K", "S"],
+        found: "0.986 in / 0.976 in",
+        expected: "0.986 in / 0.971 in",
+      },
+    ]);
+    expect(sheetOf([shaft, { id: "K", keyseat: seat({ printed: { control: ".986/.971" } }) }]).findings).toEqual([]);
+  });
+
+  it.each<[string, object, string]>([
+    ["on nothing", seat({ on: "X" }), "KEYSEAT_ON_UNKNOWN features.1.keyseat.on"],
+    ["on itself", seat({ on: "K" }), "KEYSEAT_ON_UNKNOWN features.1.keyseat.on"],
+    ["a class that is none", seat({ class: 7 }), "OPTION_INVALID features.1.keyseat.class"],
+    ["no standard known", seat({ standard: "B99" }), "OPTION_INVALID features.1.keyseat.standard"],
+    ["printed nonsense", seat({ printed: { width: "wide" } }), "CALLOUT_NOT_UNDERSTOOD features.1.keyseat.printed.width"],
+    ["printed without limits", seat({ printed: { width: "(.25)" } }), "CALLOUT_NOT_UNDERSTOOD features.1.keyseat.printed.width"],
+  ])("%s costs this row only", (_, keyseat, error) => {
+    const sheet = sheetOf([shaft, { id: "K", keyseat }]);
+    expect(errorOf(sheet.rows[1])).toBe(error);
+    expect(sheet.counts).toMatchObject({ limits: 1, failed: 1 });
+  });
+
+  it("the member must be known", () => {
+    const plain = { id: "S", callout: "1.125 +.000/-.001" };
+    expect(errorOf(sheetOf([plain, { id: "K", keyseat: seat({}) }]).rows[1])).toBe("KEYSEAT_ON_UNKNOWN features.1.keyseat.member");
+    expect(limitsText(sheetOf([plain, { id: "K", keyseat: seat({ member: "hub" }) }]).rows[1])[0]).toBe("T 1.251 in 1.241 in");
+  });
+});
+
+describe("finish and process", () => {
+  const seat = { id: "S", callout: "⌀28 mm k6" };
+  const codes = (sheet: ResolvedSheet): string[] => sheet.findings.map(({ code }) => code);
+  const withFinish = (feature: object, finish?: string): ResolvedSheet =>
+    sheetOf([{ ...seat, ...feature }], finish === undefined ? {} : { titleBlock: { ...drawing.titleBlock, finish } });
+
+  it("of the feature, or all over except as noted", () => {
+    const rows = sheetOf([{ ...seat, finish: "Ra 16" }, { id: "T", callout: "2.063" }, { id: "R", callout: "(2.1)" }], {
+      titleBlock: { ...drawing.titleBlock, finish: "Ra 125" },
+    }).rows;
+    const text = rows.map((row) => (row.ok ? `${row.surface?.finish?.value.toString() ?? "-"} ${row.surface?.from ?? "-"}` : ""));
+    expect(text).toEqual(["16 µin feature", "125 µin title block", "- -"]);
+  });
+
+  it("a bare number is in µin on an inch drawing, in µm on a metric one", () => {
+    const metric = resolveSheet({ drawing: "d", unit: "mm", features: [{ ...seat, finish: "Ra 0,8" }], decimalMark: "," });
+    const [row] = metric.rows;
+    expect(row?.ok === true && row.surface?.finish?.value.toString()).toBe("0.8 µm");
+  });
+
+  it("clean where finish, tolerance, process and function agree", () => {
+    const ground = { finish: "Ra 32", process: "grinding", function: "bearing seat" };
+    expect(codes(withFinish(ground))).toEqual([]);
+    expect(codes(withFinish({}, "Ra 32"))).toEqual([]);
+    expect(codes(withFinish({ process: "grinding" }))).toEqual([]);
+  });
+
+  it("finish too coarse for the tolerance, for the function; process that does not reach", () => {
+    // k6 on 28 is 13 µm wide; Ra 125 µin is 3.2 µm
+    expect(codes(withFinish({}, "Ra 125"))).toEqual(["FINISH_TOO_COARSE_FOR_TOLERANCE"]);
+    expect(codes(withFinish({ finish: "Ra 125", function: "bearing seat" }))).toContain("FINISH_TOO_COARSE_FOR_FUNCTION");
+    expect(codes(withFinish({ finish: "Ra 16", process: "drilling" }))).toEqual(
+      expect.arrayContaining(["PROCESS_DOES_NOT_REACH_FINISH", "PROCESS_DOES_NOT_REACH_GRADE"]),
+    );
+    expect(codes(withFinish({ process: "drilling" }))).toEqual(["PROCESS_DOES_NOT_REACH_GRADE"]);
+    const [finding] = withFinish({}, "Ra 125").findings;
+    expect(finding).toMatchObject({ severity: "warning", features: ["S"] });
+    expect(finding?.settle).not.toBe("");
+  });
+
+  it("what cannot be read is a problem with its path, and costs no limits", () => {
+    const sheet = withFinish({ finish: "shiny", process: "whittling", function: "ornament" }, "Ra");
+    expect(sheet.problems.map(({ code, path }) => `${code} ${path.join(".")}`)).toEqual([
+      expect.stringMatching(/ titleBlock\.finish$/),
+      expect.stringMatching(/ features\.0\.finish$/),
+      "PROCESS_UNKNOWN features.0.process",
+      "FINISH_FUNCTION_UNKNOWN features.0.function",
+    ]);
+    expect(sheet.counts).toMatchObject({ limits: 1, failed: 0 });
   });
 });

@@ -1,0 +1,83 @@
+export { acceptRoughness } from "./acceptRoughness.js";
+export type { AcceptanceQuestion, RoughnessAcceptance } from "./acceptRoughness.js";
+export { acceptanceRule } from "./acceptanceRule.js";
+export type { AcceptanceRule, RoughnessRule, TextureStandard } from "./acceptanceRule.js";
+export { asRoughness } from "./asRoughness.js";
+export { ballNoseCusp } from "./ballNoseCusp.js";
+export type { BallNoseCusp, BallNoseCut } from "./ballNoseCusp.js";
+export { bearingSeatFinish } from "./bearingSeatFinish.js";
+export type { BearingSeatFinish, BearingSeatQuestion } from "./bearingSeatFinish.js";
+export { checkFinish } from "./checkFinish.js";
+export type { FinishQuestion } from "./checkFinish.js";
+export { faceMilledRoughness } from "./faceMilledRoughness.js";
+export type { FaceMillingCut } from "./faceMilledRoughness.js";
+export { feedForRoughness } from "./feedForRoughness.js";
+export type { FeedForRoughness, RaForm, WantedRoughness } from "./feedForRoughness.js";
+export type { FinishFinding, FinishFindingCode } from "./finding.js";
+export { finishForFunction } from "./finishForFunction.js";
+export type { FunctionFinish } from "./finishForFunction.js";
+export { finishForTolerance } from "./finishForTolerance.js";
+export type { AllowedFinish, FinishForToleranceOptions } from "./finishForTolerance.js";
+export { finishFunctions } from "./finishFunctions.js";
+export { functionFindings } from "./functionFindings.js";
+export type { FunctionFindingsOptions } from "./functionFindings.js";
+export { gradeFindings } from "./gradeFindings.js";
+export type { GradeChart, GradeSpan, ToleranceGradeLike } from "./gradeRows.js";
+export { idealProfiles } from "./idealProfiles.js";
+export type { IdealProfile } from "./idealProfiles.js";
+export { largestNoseFeed } from "./largestNoseFeed.js";
+export { preferredRoughness } from "./preferredRoughness.js";
+export type { PreferredRoughness } from "./preferredRoughness.js";
+export { processFindings } from "./processFindings.js";
+export { processFinish } from "./processFinish.js";
+export type { AverageBand, BandEnd, OverallBand, ProcessFinish } from "./processFinish.js";
+export { processGrades } from "./processGrades.js";
+export type { ProcessGrades, ReachedTolerance } from "./processGrades.js";
+export { processNames } from "./processNames.js";
+export type { KnownProcess } from "./processNames.js";
+export { processReach } from "./processReach.js";
+export type { ProcessReach } from "./processReach.js";
+export type { BandSide, FinishReach } from "./processRow.js";
+export { processesFor } from "./processesFor.js";
+export type { ProcessesFor } from "./processesFor.js";
+export { processesForGrade } from "./processesForGrade.js";
+export type { GradeReach, ProcessesForGrade } from "./processesForGrade.js";
+export { roughness } from "./roughness.js";
+export type { RoughnessOptions } from "./roughness.js";
+export { roughnessFactor } from "./roughnessFactor.js";
+export type { RoughnessFactor, RoughnessFactorQuestion, ShearFactors } from "./roughnessFactor.js";
+export { roughnessGrades } from "./roughnessGrades.js";
+export type { RoughnessGrade } from "./roughnessGrades.js";
+export type {
+  PreferredNeighbour,
+  Roughness,
+  RoughnessData,
+  RoughnessLike,
+  RoughnessParameter,
+  RoughnessUnit,
+} from "./roughnessValue.js";
+export { rzGuide } from "./rzGuide.js";
+export type { RzGuideValue } from "./rzGuide.js";
+export { rzRange } from "./rzRange.js";
+export type { LengthRange, RzEstimate, RzRange } from "./rzRange.js";
+export { samplingLength } from "./samplingLength.js";
+export type { SamplingLengths, SamplingQuestion, SamplingStandard } from "./samplingLength.js";
+export { sharpToolRoughness } from "./sharpToolRoughness.js";
+export type { SharpToolCut, SharpToolRoughness } from "./sharpToolRoughness.js";
+export { sideMilledRoughness } from "./sideMilledRoughness.js";
+export type { SideMilledRoughness, SideMillingCut } from "./sideMilledRoughness.js";
+export { sixteenPercentStages } from "./sixteenPercentStages.js";
+export type { StagedAcceptance } from "./sixteenPercentStages.js";
+export { surfaceFactor } from "./surfaceFactor.js";
+export type { SurfaceFactor, SurfaceFactorQuestion } from "./surfaceFactor.js";
+export type { SurfaceCondition, SurfaceFactorSet } from "./tables/surfaceFactors.js";
+export type { ToleranceRuleName } from "./tables/toleranceRules.js";
+export { textureSymbols } from "./textureSymbols.js";
+export type { TexturePosition, TextureSign, TextureSymbols } from "./textureSymbols.js";
+export { toleranceFindings } from "./toleranceFindings.js";
+export { triangleRoughness } from "./triangleRoughness.js";
+export type { TriangleNote, TriangleRoughness } from "./triangleRoughness.js";
+export { turnedRoughness } from "./turnedRoughness.js";
+export type { TheoreticalRoughness, TurningCut } from "./turnedRoughness.js";
+export { turnedRoughnessWithEndEdge } from "./turnedRoughnessWithEndEdge.js";
+export type { EndEdgeCut, EndEdgeRoughness } from "./turnedRoughnessWithEndEdge.js";
