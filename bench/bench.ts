@@ -2,7 +2,7 @@
 // Everything runs on dist, as users have it. Times depend on the machine, ratios much less; nothing fails here.
 
 import { Decimal } from "decimal.js";
-import { isoDeviations, isoFit, mm, parseToleranceClass } from "limitsmith";
+import { inch, inchFit, isoDeviations, isoFit, mm, parseToleranceClass } from "limitsmith";
 import { Bench } from "tinybench";
 import { bareSearch } from "./bareSearch.js";
 import { coldImports } from "./coldImport.js";
@@ -16,6 +16,7 @@ const CLASSES = [...new Set(FITS.flatMap((fit) => fit.split("/")))];
 // 1000 sizes spread over 3 to 500 mm: far too many to be guessed by a branch predictor, all different
 const SIZES_MM = Array.from({ length: 1000 }, (_, index) => 3 + ((index * 7919) % 497_000) / 1000);
 const SIZES = SIZES_MM.map((size) => mm(size));
+const INCHES = Array.from({ length: 1000 }, (_, index) => inch(0.25 + ((index * 7919) % 18_000) / 1000));
 const DECIMALS = SIZES_MM.map((size) => new Decimal(size));
 
 // every call adds to this, and it is printed: no compiler may leave a call out
@@ -45,6 +46,9 @@ bench.add("isoFit, eight fits", () => {
   SIZES.forEach((size, index) => {
     sink += isoFit(size, FITS[index % FITS.length] ?? FIT).maxClearance.ticks;
   });
+});
+bench.add("inchFit", () => {
+  for (const size of INCHES) sink += inchFit(size, "LN2").maxClearance.ticks;
 });
 bench.add("sql.js", () => {
   for (const size of SIZES_MM) sink += sqlJs(size, "m6");
@@ -110,6 +114,7 @@ const lines: Line[] = [
   ...(native === null ? [] : [faster("isoFit", "better-sqlite3", 3)]),
   faster("isoFit, eight fits", "sql.js", null),
   faster("isoFit", "Decimal fit", null),
+  slower("inchFit", "isoFit", 1.5),
   cold("import", 2),
   cold("require", null),
 ];

@@ -192,8 +192,7 @@ export class LimitsError extends Error {
 
 /** What {@link attempt} gives: the value, or the error as plain data. */
 export type Attempt<T> =
-  | { readonly ok: true; readonly value: T }
-  | { readonly ok: false; readonly error: LimitsProblem };
+  { readonly ok: true; readonly value: T } | { readonly ok: false; readonly error: LimitsProblem };
 
 /** By name, not by `instanceof`: the error may come from another copy of the package. */
 function isLimitsError(error: unknown): error is Pick<LimitsError, "toJSON"> {

@@ -120,7 +120,13 @@ function cells(head, resolved) {
 
 function printTable(header, lines) {
   const widths = header.map((title, column) => Math.max(title.length, ...lines.map((line) => line[column].length)));
-  const show = (line) => console.log(line.map((cell, column) => cell.padEnd(widths[column])).join("  ").trimEnd());
+  const show = (line) =>
+    console.log(
+      line
+        .map((cell, column) => cell.padEnd(widths[column]))
+        .join("  ")
+        .trimEnd(),
+    );
   show(header);
   show(widths.map((width) => "-".repeat(width)));
   lines.forEach(show);

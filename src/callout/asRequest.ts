@@ -1,14 +1,27 @@
 import { LimitsError } from "../errors.js";
+import { parseInchClass } from "../inchFits/index.js";
+import { parseToleranceClass } from "../iso286/index.js";
 import { hasOwn } from "../ownValue.js";
-import { asLength, readAngle } from "../units/index.js";
-import type { WrittenDimension } from "../units/index.js";
-import type { CalloutRequest } from "./request.js";
+import { asLength, compareLengths, readAngle } from "../units/index.js";
+import type { Length, WrittenDimension } from "../units/index.js";
+import type { CalloutRequest, CalloutShape } from "./request.js";
+
+const KNOWN_SHAPES: readonly CalloutShape[] = [
+  "unmarked",
+  "diameter",
+  "radius",
+  "spherical diameter",
+  "spherical radius",
+  "square",
+];
 
 /** Takes a request that may have travelled through JSON or `structuredClone` and makes its lengths lengths again. */
 export function asRequest(request: CalloutRequest): CalloutRequest {
   const given: unknown = request;
   if (typeof given !== "object" || given === null || !hasOwn(given, "kind")) throw notARequest(given);
-  const { depth, dual } = request;
+  const { depth, dual, count, shape } = request;
+  if (count !== null && (!Number.isInteger(count) || count < 1)) throw notARequest(count);
+  if (!KNOWN_SHAPES.includes(shape)) throw notARequest(shape);
   return Object.freeze({
     ...asBody(request),
     depth: depth === null ? null : asSize(depth),
@@ -19,22 +32,30 @@ export function asRequest(request: CalloutRequest): CalloutRequest {
 function asBody(request: CalloutRequest): CalloutRequest {
   switch (request.kind) {
     case "fit":
+      checkFit(request.fit);
+      return { ...request, nominal: asSize(request.nominal) };
     case "inch class":
+      parseInchClass(request.inchClass);
+      if (!["hole", "shaft", null].includes(request.member)) throw notARequest(request.member);
+      return { ...request, nominal: asSize(request.nominal) };
     case "plain":
     case "reference":
     case "basic":
       return { ...request, nominal: asSize(request.nominal) };
     case "class": {
-      const { nominal, printed } = request;
+      const { nominal, printed, toleranceClass } = request;
+      parseToleranceClass(toleranceClass);
       return { ...request, nominal: asSize(nominal), printed: printed === null ? null : asPair(printed) };
     }
     case "deviations": {
-      const { nominal, upper, lower } = request;
-      return { ...request, nominal: asSize(nominal), upper: asLength(upper), lower: asLength(lower) };
+      const { nominal, upper, lower, form } = request;
+      if (!["plus-minus", "two"].includes(form)) throw notARequest(form);
+      return { ...request, nominal: asSize(nominal), ...asDeviations({ upper, lower }) };
     }
     case "limits":
       return { ...request, ...asPair(request) };
     case "single limit":
+      if (!["max", "min"].includes(request.side)) throw notARequest(request.side);
       return { ...request, size: asSize(request.size) };
     case "chamfer": {
       const { length, angle, deviations } = request;
@@ -42,8 +63,7 @@ function asBody(request: CalloutRequest): CalloutRequest {
         ...request,
         length: asSize(length),
         angle: readAngle(angle),
-        deviations:
-          deviations === null ? null : { upper: asLength(deviations.upper), lower: asLength(deviations.lower) },
+        deviations: deviations === null ? null : asDeviations(deviations),
       };
     }
     case "angle": {
@@ -56,10 +76,28 @@ function asBody(request: CalloutRequest): CalloutRequest {
       };
     }
     case "thread":
+      if (typeof (request.designation as unknown) !== "string") throw notARequest(request.designation);
       return request;
     default:
       throw notARequest((request as { readonly kind?: unknown }).kind);
   }
+}
+
+function checkFit(fit: string): void {
+  const classes = typeof (fit as unknown) === "string" ? fit.split("/") : [];
+  const [hole, shaft] = classes.length === 2 ? classes.map((one) => parseToleranceClass(one).kind) : [];
+  if (hole !== "hole" || shaft !== "shaft") throw notARequest(fit);
+}
+
+function asDeviations(given: { readonly upper: Length; readonly lower: Length }): { upper: Length; lower: Length } {
+  const upper = asLength(given.upper);
+  const lower = asLength(given.lower);
+  if (compareLengths(upper, lower) < 0) {
+    throw new LimitsError("LIMITS_UPSIDE_DOWN", "the upper deviation is the larger one", {
+      value: `${upper.toString()} / ${lower.toString()}`,
+    });
+  }
+  return { upper, lower };
 }
 
 function asPair({ max, min }: { readonly max: WrittenDimension; readonly min: WrittenDimension }): {

@@ -1,18 +1,14 @@
-import { ownValue } from "../ownValue.js";
-import type { WrittenDimension } from "../units/index.js";
+import type { LengthUnit, WrittenDimension } from "../units/index.js";
 import { asRequest } from "./asRequest.js";
 import { readCallout } from "./readCallout.js";
 import type { CalloutOptions } from "./readSize.js";
-import type { CalloutRequest } from "./request.js";
+import type { CalloutRequest, DeviationsRequest } from "./request.js";
 
 /** A departure from the number rules of a drawing standard. */
 export interface NotationFault {
   /** Stable code. */
   readonly code:
-    | "ZERO_BEFORE_POINT_MISSING"
-    | "ZERO_BEFORE_POINT_NEEDLESS"
-    | "TRAILING_ZERO_NEEDLESS"
-    | "PLACES_DIFFER";
+    "ZERO_BEFORE_POINT_MISSING" | "ZERO_BEFORE_POINT_NEEDLESS" | "TRAILING_ZERO_NEEDLESS" | "PLACES_DIFFER";
   /** The rule, and what would follow it. */
   readonly says: string;
   /** The number that departs, as it was written. */
@@ -39,66 +35,119 @@ export interface NotationFault {
  */
 export function notationFaults(callout: string | CalloutRequest, options?: CalloutOptions): readonly NotationFault[] {
   const request = typeof callout === "string" ? readCallout(callout, options) : asRequest(callout);
-  const decimalMark = ownValue(options, "decimalMark");
-  const sizes = sizesOf(request).filter(({ form }) => form === "decimal");
-  const faults = sizes.flatMap((size) => zeroFaults(size, request.kind, decimalMark));
-  return Object.freeze([...faults, ...placesFaults(request)].map((fault) => Object.freeze(fault)));
+  const mark = request.text.includes(",") ? "," : ".";
+  const sizes = sizesOf(request).flatMap(({ size, padded }) => sizeFaults(size, padded, mark));
+  return Object.freeze([...sizes, ...toleranceFaults(request, mark)].map((fault) => Object.freeze(fault)));
 }
 
-function sizesOf(request: CalloutRequest): readonly WrittenDimension[] {
+interface WrittenNumber {
+  readonly size: WrittenDimension;
+  /** True where zeros may stand at the end: limits are padded to the same places, basic sizes are taught both ways. */
+  readonly padded: boolean;
+}
+
+function sizesOf(request: CalloutRequest): readonly WrittenNumber[] {
+  const depth = request.depth === null ? [] : [{ size: request.depth, padded: false }];
+  return [...mainSizes(request), ...depth].filter(({ size }) => size.form === "decimal");
+}
+
+function mainSizes(request: CalloutRequest): readonly WrittenNumber[] {
+  const padded = (...sizes: readonly WrittenDimension[]): WrittenNumber[] =>
+    sizes.map((size) => ({ size, padded: true }));
   switch (request.kind) {
     case "limits":
-      return [request.max, request.min];
+      return padded(request.max, request.min);
+    case "class": {
+      const { nominal, printed } = request;
+      return [{ size: nominal, padded: false }, ...(printed === null ? [] : padded(printed.max, printed.min))];
+    }
+    case "basic":
+      return padded(request.nominal);
     case "single limit":
-      return [request.size];
+      return [{ size: request.size, padded: false }];
     case "chamfer":
-      return [request.length];
+      return [{ size: request.length, padded: false }];
     case "angle":
     case "thread":
       return [];
     default:
-      return [request.nominal];
+      return [{ size: request.nominal, padded: false }];
   }
 }
 
-function zeroFaults(size: WrittenDimension, kind: CalloutRequest["kind"], decimalMark: string | undefined): NotationFault[] {
-  const { text, length } = size;
-  const metric = length.unit === "mm" || length.unit === "um";
-  const mark = decimalMark ?? ".";
-  const faults: NotationFault[] = [];
-  if (metric && text.startsWith(mark)) {
-    faults.push({ code: "ZERO_BEFORE_POINT_MISSING", says: `metric: a zero before the point, 0${text}`, value: text });
-  }
-  if (!metric && text.startsWith(`0${mark}`)) {
-    faults.push({ code: "ZERO_BEFORE_POINT_NEEDLESS", says: `inch: no zero before the point, ${text.slice(1)}`, value: text });
-  }
-  // limits are padded to the same places, and basic sizes are taught both ways
-  if (metric && kind !== "limits" && kind !== "basic" && text.includes(mark) && text.endsWith("0")) {
+function sizeFaults({ text, length }: WrittenDimension, padded: boolean, mark: string): NotationFault[] {
+  const metric = isMetric(length.unit);
+  const faults = pointFaults(text, metric, mark);
+  if (metric && !padded && text.includes(mark) && text.endsWith("0")) {
     faults.push({ code: "TRAILING_ZERO_NEEDLESS", says: "metric: no zero after the last figure", value: text });
   }
   return faults;
 }
 
-/** Inch: size and tolerance have the same places; limits have them in both systems. */
-function placesFaults(request: CalloutRequest): NotationFault[] {
-  if (request.kind === "limits") {
-    const { max, min } = request;
-    return max.form === "decimal" && min.form === "decimal" && max.places !== min.places
-      ? [{ code: "PLACES_DIFFER", says: "both limits have the same decimals", value: `${max.text}/${min.text}` }]
-      : [];
+/** Metric numbers below one have a zero before the point, inch numbers have none. */
+function pointFaults(text: string, metric: boolean, mark: string): NotationFault[] {
+  if (metric && text.startsWith(mark)) {
+    return [{ code: "ZERO_BEFORE_POINT_MISSING", says: `metric: a zero before the point, 0${text}`, value: text }];
   }
-  if (request.kind !== "deviations") return [];
-  const { nominal } = request;
-  const inch = nominal.length.unit === "in" && nominal.form === "decimal";
-  const places = tolerancePlaces(request);
-  if (!inch || places.every((count) => count === nominal.places)) return [];
-  return [{ code: "PLACES_DIFFER", says: "inch: size and tolerance have the same decimals", value: request.text }];
+  if (!metric && text.startsWith(`0${mark}`)) {
+    return [
+      { code: "ZERO_BEFORE_POINT_NEEDLESS", says: `inch: no zero before the point, ${text.slice(1)}`, value: text },
+    ];
+  }
+  return [];
 }
 
-/** Decimals of the tolerance as they stand in the text; a plain 0 has none. */
-function tolerancePlaces({ text, parts }: CalloutRequest): readonly number[] {
+function toleranceFaults(request: CalloutRequest, mark: string): NotationFault[] {
+  switch (request.kind) {
+    case "limits":
+      return pairFaults(request);
+    case "class":
+      return request.printed === null ? [] : pairFaults(request.printed);
+    case "deviations":
+      return deviationFaults(request, mark);
+    default:
+      return [];
+  }
+}
+
+/** Limits have the same decimals, in both systems. */
+function pairFaults({ max, min }: { readonly max: WrittenDimension; readonly min: WrittenDimension }): NotationFault[] {
+  if (max.form !== "decimal" || min.form !== "decimal" || max.places === min.places) return [];
+  return [{ code: "PLACES_DIFFER", says: "both limits have the same decimals", value: `${max.text}/${min.text}` }];
+}
+
+/** Inch: size and both deviations have the same decimals; metric: both deviations have, and a nil one is a plain 0. */
+function deviationFaults(request: DeviationsRequest, mark: string): NotationFault[] {
+  const { nominal, text } = request;
+  if (nominal.form !== "decimal") return [];
+  const metric = isMetric(nominal.length.unit);
+  const numbers = toleranceNumbers(request);
+  const faults = numbers.flatMap((number) => pointFaults(number, metric, mark));
+  const nil = metric ? numbers.filter((number) => number.length > 1 && Number(number.replace(",", ".")) === 0) : [];
+  for (const value of nil)
+    faults.push({ code: "TRAILING_ZERO_NEEDLESS", says: "metric: a nil deviation is a plain 0", value });
+  const places = numbers.filter((number) => !metric || number !== "0").map((number) => placesOf(number, mark));
+  const wanted = metric ? places[0] : nominal.places;
+  if (nil.length === 0 && places.some((count) => count !== wanted)) {
+    const says = metric
+      ? "metric: both deviations have the same decimals"
+      : "inch: size and deviations have the same decimals";
+    faults.push({ code: "PLACES_DIFFER", says, value: text });
+  }
+  return faults;
+}
+
+/** The numbers of the tolerance as they stand in the text. */
+function toleranceNumbers({ text, parts }: DeviationsRequest): readonly string[] {
   return parts
     .filter(({ part }) => part === "tolerance")
-    .flatMap(({ start, end }) => text.slice(start, end).match(/\d*[.,]?\d+/g) ?? [])
-    .map((number) => /[.,](\d*)$/.exec(number)?.[1]?.length ?? 0);
+    .flatMap(({ start, end }) => text.slice(start, end).match(/[\d.,]+/g) ?? []);
+}
+
+function placesOf(number: string, mark: string): number {
+  return number.includes(mark) ? number.length - number.indexOf(mark) - 1 : 0;
+}
+
+function isMetric(unit: LengthUnit): boolean {
+  return unit === "mm" || unit === "um";
 }

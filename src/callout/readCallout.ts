@@ -27,7 +27,7 @@ import { TokenReader } from "./tokenReader.js";
  *   says where each part stood
  * @throws `CALLOUT_NOT_UNDERSTOOD` with the position, `CALLOUT_TWO_TOLERANCES`, `CALLOUT_ZERO_TOLERANCE`,
  *   `CALLOUT_UNIT_CONFLICT`, `CONTROL_CHARACTER`, `TEXT_EMPTY`, `TEXT_TOO_LONG`, `UNIT_MISSING`, `LIMITS_UPSIDE_DOWN`,
- *   `CLASS_LETTER_UNKNOWN`, `CLASS_GRADE_UNKNOWN`, and what {@link readDimension} and {@link readAngle} throw
+ *   `CLASS_LETTER_UNKNOWN`, `CLASS_GRADE_UNKNOWN`, and what `readDimension` and `readAngle` throw
  * @example
  * ```ts
  * import { readCallout } from "limitsmith";
@@ -49,7 +49,8 @@ export function readCallout(text: string, options: CalloutOptions = {}): Callout
   const outer = readPrefix(reader);
   const enclosed = reader.takeIf("(", "[");
   const prefix = enclosed === undefined ? outer : innerPrefix(outer, readPrefix(reader));
-  const bare = enclosed === undefined ? readBody(reader, options, prefix) : readEnclosed(reader, enclosed.text, options);
+  const bare =
+    enclosed === undefined ? readBody(reader, options, prefix) : readEnclosed(reader, enclosed.text, options);
   const suffix = readSuffix(reader, options, bare, prefix);
   if (!reader.done) throw reader.refuse("this does not belong to the callout before it");
   return Object.freeze({ ...suffix.bare, ...suffix.common, text, parts: reader.parts } as CalloutRequest);

@@ -35,7 +35,11 @@ export function readDeviations(
 }
 
 /** Reads one deviation with its sign, in the unit of its size: `+.002`; a zero may go without a sign. */
-export function readSigned(reader: TokenReader, unit: WrittenDimension["length"]["unit"] | undefined, options: CalloutOptions): Length {
+export function readSigned(
+  reader: TokenReader,
+  unit: WrittenDimension["length"]["unit"] | undefined,
+  options: CalloutOptions,
+): Length {
   const sign = reader.takeIf("+", "-", "\u2212", "\u2013");
   const { length } = readSize(reader, unit === undefined ? options : { ...options, unit });
   if (sign === undefined && length.ticks !== 0) throw reader.refuse("a deviation other than zero needs its sign");
@@ -48,6 +52,7 @@ export function refuseOtherUnit(reader: TokenReader, first: Length, second: Leng
   throw new LimitsError("CALLOUT_UNIT_CONFLICT", "one callout is in two units", {
     value: reader.text,
     allowed: `all of it in ${first.unit}`,
+    position: { start: 0, end: reader.takenTo },
   });
 }
 
@@ -56,7 +61,11 @@ export function isSign(text: string): boolean {
 }
 
 /** Refuses deviations that are upside down or leave no tolerance at all. */
-export function refuseBad(reader: TokenReader, { upper, lower }: { upper: Length; lower: Length }, start: number): void {
+export function refuseBad(
+  reader: TokenReader,
+  { upper, lower }: { upper: Length; lower: Length },
+  start: number,
+): void {
   refuseOrder(reader, compareLengths(upper, lower), { start, end: reader.takenTo });
 }
 

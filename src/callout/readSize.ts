@@ -13,6 +13,7 @@ export interface CalloutOptions {
   readonly decimalMark?: DecimalMark;
 }
 
+const INCH_MARKS: ReadonlySet<string> = new Set(['"', "″", "IN", "INCH", "INCHES"]);
 const UNIT_WORDS: ReadonlySet<string> = new Set(["MM", "UM", "\u00b5M", "\u039cM", "IN", "INCH", "INCHES", "THOU"]);
 
 /** Reads one size: a decimal, a fraction or a mixed number, with its unit where one stands behind it. */
@@ -20,11 +21,17 @@ export function readSize(reader: TokenReader, options: CalloutOptions): WrittenD
   const first = reader.peek();
   if (first?.kind !== "number") throw reader.refuse("a size is expected here");
   reader.take();
+  if (areMetricLimits(reader, options)) return whole(reader, first, options);
   if (isFraction(reader, 0)) takeMany(reader, 2);
   else if (isWhole(first) && isWholeToken(reader.peek()) && isFraction(reader, 1)) takeMany(reader, 3);
   else if (isWhole(first) && reader.peek()?.text === "-" && isWholeToken(reader.peek(1)) && isFraction(reader, 2)) {
     takeMany(reader, 4);
   }
+  return whole(reader, first, options);
+}
+
+/** The size from its first token to the last one taken, with its unit. */
+function whole(reader: TokenReader, first: Token, options: CalloutOptions): WrittenDimension {
   const position = { start: first.start, end: reader.takenTo };
   const unit = takeUnit(reader);
   const decimalMark = ownValue(options, "decimalMark");
@@ -35,6 +42,14 @@ export function readSize(reader: TokenReader, options: CalloutOptions): WrittenD
       ...(decimalMark === undefined ? {} : { decimalMark }),
     }),
   );
+}
+
+/** `26/24` on a metric drawing: there are no fractions of a millimetre, so the larger number first means limits. */
+function areMetricLimits(reader: TokenReader, options: CalloutOptions): boolean {
+  const unit = ownValue(options, "unit");
+  if ((unit !== "mm" && unit !== "um") || !isFraction(reader, 0)) return false;
+  const inchBehind = INCH_MARKS.has(reader.peekText(2) ?? "");
+  return !inchBehind && Number(reader.peek(-1)?.text) > Number(reader.peek(1)?.text);
 }
 
 /** `/ n` follows `ahead` tokens on, and both sides are whole: then it is a fraction, not two limits. */

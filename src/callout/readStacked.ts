@@ -15,7 +15,10 @@ export function readStackedDeviations(
 ): BareRequest<DeviationsRequest> | null {
   const first = reader.peek();
   const startsSigned = first !== undefined && isSign(first.text);
-  if (!startsSigned && !(first?.kind === "number" && reader.peek(1)?.kind === "line end" && reader.peek(3) !== undefined)) {
+  if (
+    !startsSigned &&
+    !(first?.kind === "number" && reader.peek(1)?.kind === "line end" && reader.peek(3) !== undefined)
+  ) {
     return null;
   }
   return reader.try(() => {
@@ -24,7 +27,8 @@ export function readStackedDeviations(
     if (!upperRead) return null;
     const upper = reader.part("tolerance", () => readSigned(reader, options.unit, options));
     if (reader.peek()?.kind !== "line end") {
-      if (startsSigned) throw reader.refuse("a size cannot start with a sign", "the upper deviation alone on the first line");
+      if (startsSigned)
+        throw reader.refuse("a size cannot start with a sign", "the upper deviation alone on the first line");
       return null;
     }
     reader.skipLineEnd();

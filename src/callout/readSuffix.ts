@@ -28,14 +28,14 @@ export function readSuffix(reader: TokenReader, options: CalloutOptions, given: 
   let through = false;
   let depth: WrittenDimension | null = null;
   let dual: DualSize | null = null;
-  for (let from = -1; from !== reader.from && !reader.done; ) {
+  for (let from = -1; from !== reader.from && !reader.done;) {
     from = reader.from;
     reader.skipLineEnd();
     if (!typical) typical = takeWord(reader, "TYP");
     if (!through) through = takeWord(reader, "THRU", "THROUGH");
-    if (depth === null) depth = readDepth(reader, options);
-    if (count === null) count = readPlaces(reader);
-    if (dual === null) dual = readDual(reader, bare, options);
+    depth ??= readDepth(reader, options);
+    count ??= readPlaces(reader);
+    dual ??= readDual(reader, bare, options);
     if (shape === "unmarked") shape = shapeBehind(reader, bare);
     bare = markPlain(reader, bare);
   }
@@ -79,7 +79,9 @@ function shapeTaken(reader: TokenReader): CalloutShape {
 }
 
 function shapeOf(text: string): CalloutShape {
-  return SHAPES.get(text.toUpperCase().replace(".", "")) ?? (/^S\s*[⌀Ø]$/i.test(text) ? "spherical diameter" : "unmarked");
+  return (
+    SHAPES.get(text.toUpperCase().replace(".", "")) ?? (/^S\s*[⌀Ø]$/i.test(text) ? "spherical diameter" : "unmarked")
+  );
 }
 
 /** `↧.50`, `DEPTH .50`, `.50 DEEP`, `X .50 DEEP`. */
@@ -122,7 +124,7 @@ function readDual(reader: TokenReader, bare: BareRequest, given: CalloutOptions)
   return reader.part("other unit", () => {
     const options: CalloutOptions = { ...given, unit: metric ? "in" : "mm" };
     const first = readSize(reader, options);
-    const second = takeLimitsMark(reader) ? readSize(reader, options) : first;
+    const second = takeLimitsMark(reader, first.length.unit) ? readSize(reader, options) : first;
     if (reader.takeIf("]") === undefined) throw reader.refuse("the bracket is not closed");
     const [max, min] = compareLengths(first.length, second.length) < 0 ? [second, first] : [first, second];
     refuseOtherUnit(reader, lengthOfTicks(0, metric ? "in" : "mm"), max.length);

@@ -4,14 +4,56 @@ import type { TokenReader } from "./tokenReader.js";
 
 /** Words that only thread designations have. */
 const THREAD_WORDS: ReadonlySet<string> = new Set([
-  "UN", "UNC", "UNF", "UNEF", "UNS", "UNR", "UNRC", "UNRF", "UNJ", "UNJC", "UNJF",
-  "NPT", "NPTF", "NPS", "NPSM", "NPSF", "NPSI", "ACME", "STUB", "BUTT", "BSW", "BSF", "BSP", "BSPP", "BSPT", "BA",
+  "UN",
+  "UNC",
+  "UNF",
+  "UNEF",
+  "UNS",
+  "UNR",
+  "UNRC",
+  "UNRF",
+  "UNJ",
+  "UNJC",
+  "UNJF",
+  "NPT",
+  "NPTF",
+  "NPS",
+  "NPSM",
+  "NPSF",
+  "NPSI",
+  "ACME",
+  "STUB",
+  "BUTT",
+  "BSW",
+  "BSF",
+  "BSP",
+  "BSPP",
+  "BSPT",
+  "BA",
 ]);
 /** Letters that start a thread designation when a number touches them or follows. */
 const THREAD_LETTERS: ReadonlySet<string> = new Set(["M", "MJ", "Tr", "TR", "G", "Rc", "Rp"]);
 /** What else stands in a designation: X between size and pitch, tolerance classes, hand. */
 const OTHER_WORDS: ReadonlySet<string> = new Set([
-  "X", "A", "B", "D", "E", "F", "G", "H", "P", "PH", "LH", "RH", "INT", "EXT", "M", "MJ", "TR", "RC", "RP",
+  "X",
+  "A",
+  "B",
+  "D",
+  "E",
+  "F",
+  "G",
+  "H",
+  "P",
+  "PH",
+  "LH",
+  "RH",
+  "INT",
+  "EXT",
+  "M",
+  "MJ",
+  "TR",
+  "RC",
+  "RP",
 ]);
 const MARKS: ReadonlySet<string> = new Set(["/", "-", "\u2013", "×", "#", ".", "(", ")"]);
 const SUFFIX_WORDS: ReadonlySet<string> = new Set(["THRU", "THROUGH", "DEEP", "DEPTH", "TYP", "↧"]);

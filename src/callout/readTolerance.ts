@@ -2,8 +2,8 @@ import { LimitsError } from "../errors.js";
 import { parseInchClass } from "../inchFits/index.js";
 import { parseToleranceClass } from "../iso286/index.js";
 import { atPosition } from "../located.js";
-import { angleOfMicroarcseconds, compareLengths } from "../units/index.js";
-import type { Angle, WrittenDimension } from "../units/index.js";
+import { add, angleOfMicroarcseconds, compareLengths, exactPlaces, writeLength } from "../units/index.js";
+import type { Angle, Length, WrittenDimension } from "../units/index.js";
 import { readSmallAngle } from "./readAngleTokens.js";
 import { readChamferAngle } from "./readChamfer.js";
 import { isSign, readDeviations, refuseOrder, refuseOtherUnit } from "./readDeviations.js";
@@ -26,14 +26,7 @@ import type { TokenReader } from "./tokenReader.js";
 type Form = (reader: TokenReader, size: WrittenDimension, options: CalloutOptions) => BareRequest | null;
 
 /** What may stand behind a size, tried in this order; a new form is one more function here. */
-const FORMS: readonly Form[] = [
-  limitsForm,
-  chamferForm,
-  inchClassForm,
-  classForm,
-  deviationsForm,
-  singleLimitForm,
-];
+const FORMS: readonly Form[] = [limitsForm, chamferForm, inchClassForm, classForm, deviationsForm, singleLimitForm];
 
 /** Reads the tolerance behind a size; without one the size is plain. */
 export function readTolerance(
@@ -158,16 +151,25 @@ function takeClass(reader: TokenReader): string {
   return text;
 }
 
-/** `(35.018/35.002)` behind a class. */
+/** `(35.018/35.002)` or `(+0.018/+0.002)` behind a class. */
 function printedLimits(reader: TokenReader, nominal: WrittenDimension, options: CalloutOptions): PrintedLimits | null {
   if (reader.peekText() !== "(") return null;
   return reader.part("tolerance", () => {
     reader.take();
     const sizeOptions = { ...options, unit: nominal.length.unit };
-    const first = readSize(reader, sizeOptions);
-    const second = takeLimitsMark(reader) ? readSize(reader, sizeOptions) : null;
+    const deviations = readDeviations(reader, nominal, options);
+    const first = deviations === null ? readSize(reader, sizeOptions) : sizeAt(nominal, deviations.upper);
+    const second =
+      deviations !== null
+        ? sizeAt(nominal, deviations.lower)
+        : takeLimitsMark(reader, first.length.unit)
+          ? readSize(reader, sizeOptions)
+          : null;
     if (second === null || reader.takeIf(")") === undefined) {
-      throw reader.refuse("limits in brackets are two sizes", "such as (35.018/35.002)");
+      throw reader.refuse(
+        "limits in brackets are two sizes or two deviations",
+        "such as (35.018/35.002) or (+0.018/+0.002)",
+      );
     }
     const { max, min } = orderedLimits(reader, first, second);
     return Object.freeze({ max, min });
@@ -184,9 +186,22 @@ function limitsForm(
   size: WrittenDimension,
   options: CalloutOptions,
 ): BareRequest<LimitsRequest> | null {
-  if (reader.peek()?.kind === "line end" && reader.peek(1)?.kind === "number") return stackedLimits(reader, size, options);
-  if (!takeLimitsMark(reader)) return null;
-  return orderedLimits(reader, size, reader.part("size", () => readSize(reader, { ...options, unit: size.length.unit })));
+  if (reader.peek()?.kind === "line end" && reader.peek(1)?.kind === "number")
+    return stackedLimits(reader, size, options);
+  if (!takeLimitsMark(reader, size.length.unit)) return null;
+  return orderedLimits(
+    reader,
+    size,
+    reader.part("size", () => readSize(reader, { ...options, unit: size.length.unit })),
+  );
+}
+
+/** A limit that stands as a deviation from the nominal, as a size: `35 k6 (+0.018/+0.002)`. */
+function sizeAt(nominal: WrittenDimension, deviation: Length): WrittenDimension {
+  const length = add(nominal.length, deviation);
+  const places = Math.max(nominal.places, exactPlaces(deviation, nominal.length.unit) ?? 0);
+  const text = writeLength(length, { places, style: "inch", symbol: false });
+  return Object.freeze({ length, text, form: "decimal", places, unitWritten: false });
 }
 
 /** Two sizes on two lines are limits only where nothing stands behind them. */

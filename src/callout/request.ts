@@ -2,30 +2,15 @@ import type { TextSpan } from "../errors.js";
 import type { Angle, Length, WrittenDimension } from "../units/index.js";
 
 /** The mark that says what shape a size belongs to. */
-export type CalloutShape =
-  | "unmarked"
-  | "diameter"
-  | "radius"
-  | "spherical diameter"
-  | "spherical radius"
-  | "square";
+export type CalloutShape = "unmarked" | "diameter" | "radius" | "spherical diameter" | "spherical radius" | "square";
 
 /** What a piece of a callout's text is. */
 export type CalloutPartName =
-  | "count"
-  | "shape"
-  | "size"
-  | "tolerance"
-  | "class"
-  | "member"
-  | "angle"
-  | "thread"
-  | "word"
-  | "depth"
-  | "other unit";
+  "count" | "shape" | "size" | "tolerance" | "class" | "member" | "angle" | "thread" | "word" | "depth" | "other unit";
 
 /** Where in the text one part of the callout stood. */
 export interface CalloutPart extends TextSpan {
+  /** What this piece of the text is. */
   readonly part: CalloutPartName;
 }
 
@@ -33,6 +18,7 @@ export interface CalloutPart extends TextSpan {
 export interface RequestBase {
   /** The callout as it was written. */
   readonly text: string;
+  /** Mark that says what shape the size belongs to. */
   readonly shape: CalloutShape;
   /** How many times the feature is there (`2X`, `4 PLACES`); `null` where the text does not say. */
   readonly count: number | null;
@@ -50,6 +36,7 @@ export interface RequestBase {
 
 /** One size, or two limits, repeated in the other unit system: `[9.525]`, `[.9843/.9847]`. */
 export interface DualSize {
+  /** The larger one. */
   readonly max: WrittenDimension;
   /** Equal to `max` where one size stands. */
   readonly min: WrittenDimension;
@@ -57,7 +44,9 @@ export interface DualSize {
 
 /** Limits printed in brackets behind a class: `(35.018/35.002)`. */
 export interface PrintedLimits {
+  /** The larger one. */
   readonly max: WrittenDimension;
+  /** The smaller one. */
   readonly min: WrittenDimension;
 }
 
@@ -85,7 +74,9 @@ export interface FitRequest extends RequestBase {
 
 /** A size with an inch fit class: `1.125 LN2`, `.625 LT2S hole`. */
 export interface InchClassRequest extends RequestBase {
+  /** Tells the requests apart. */
   readonly kind: "inch class";
+  /** Nominal size. */
   readonly nominal: WrittenDimension;
   /** Such as `"LN2"` or `"LT2S"`, in capitals. */
   readonly inchClass: string;
@@ -153,10 +144,13 @@ export interface BasicRequest extends RequestBase {
 
 /** A chamfer: `.02 X 45°`, `45° X .02`, `C0.5`. */
 export interface ChamferRequest extends RequestBase {
+  /** Tells the requests apart. */
   readonly kind: "chamfer";
+  /** Length of the chamfer. */
   readonly length: WrittenDimension;
   /** Deviations of the length; `null` where it falls to the title block. */
   readonly deviations: { readonly upper: Length; readonly lower: Length } | null;
+  /** The angle. */
   readonly angle: Angle;
 }
 
@@ -166,11 +160,13 @@ export interface AngleRequest extends RequestBase {
   readonly kind: "angle";
   /** The angle as it was written. */
   readonly angle: Angle;
+  /** Deviations of its own; `null` where it falls to the title block. */
   readonly deviations: { readonly upper: Angle; readonly lower: Angle } | null;
 }
 
 /** A thread: governed by its own standard, so that no default tolerance is put on it. */
 export interface ThreadRequest extends RequestBase {
+  /** Tells the requests apart. */
   readonly kind: "thread";
   /** As it was written: `"M8x1.25-6g"`. */
   readonly designation: string;

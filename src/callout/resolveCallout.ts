@@ -22,6 +22,7 @@ export interface CalloutContext extends CalloutOptions {
 
 /** What every outcome has. */
 interface OutcomeBase {
+  /** What the callout asks for. */
   readonly request: CalloutRequest;
   /** Limits of the depth, by the title block; `null` where the callout has no depth. */
   readonly depth: Limits | null;
@@ -29,53 +30,64 @@ interface OutcomeBase {
 
 /** Limits of one size, and the fit that they come from where the callout or its class is one. */
 export interface LimitsOutcome extends OutcomeBase {
+  /** Tells the outcomes apart. */
   readonly outcome: "limits";
+  /** The limits found. */
   readonly limits: Limits;
+  /** The fit that it comes from. */
   readonly fit: Fit | null;
 }
 
 /** A fit, where nothing says which of its members the callout stands on. */
 export interface FitOutcome extends OutcomeBase {
+  /** Tells the outcomes apart. */
   readonly outcome: "fit";
+  /** The fit that it comes from. */
   readonly fit: Fit;
 }
 
 /** One limit of size. */
 export interface SingleLimitOutcome extends OutcomeBase {
+  /** Tells the outcomes apart. */
   readonly outcome: "single limit";
+  /** The one limit. */
   readonly single: SingleLimit;
 }
 
 /** Limits of an angle. */
 export interface AngleOutcome extends OutcomeBase {
+  /** Tells the outcomes apart. */
   readonly outcome: "angle";
+  /** The angle. */
   readonly angle: AngleLimits;
 }
 
 /** Limits of a chamfer's length and angle. */
 export interface ChamferOutcome extends OutcomeBase {
+  /** Tells the outcomes apart. */
   readonly outcome: "chamfer";
+  /** The limits found. */
   readonly limits: Limits;
+  /** The angle. */
   readonly angle: AngleLimits;
 }
 
 /** A size without limits of its own, and why: reference, basic, thread. */
 export interface NoLimitsOutcome extends OutcomeBase {
+  /** Tells the outcomes apart. */
   readonly outcome: "no limits";
+  /** Why there are none. */
   readonly reason: string;
 }
 
 /** A callout turned into limits, told apart by `outcome`: plain frozen data. */
 export type ResolvedCallout =
-  | LimitsOutcome
-  | FitOutcome
-  | SingleLimitOutcome
-  | AngleOutcome
-  | ChamferOutcome
-  | NoLimitsOutcome;
+  LimitsOutcome | FitOutcome | SingleLimitOutcome | AngleOutcome | ChamferOutcome | NoLimitsOutcome;
 
 type Block = TitleBlock | TitleBlockSpec | undefined;
-type BareOutcome<Outcome = ResolvedCallout> = Outcome extends ResolvedCallout ? Omit<Outcome, keyof OutcomeBase> : never;
+type BareOutcome<Outcome = ResolvedCallout> = Outcome extends ResolvedCallout
+  ? Omit<Outcome, keyof OutcomeBase>
+  : never;
 
 /**
  * Turns a callout into limits, by its class, its own tolerance, or the title block.
@@ -137,7 +149,10 @@ function resolve(request: CalloutRequest, feature: "hole" | "shaft" | undefined,
       return found(limitsFromMaxMin({ max: max.length, min: min.length, basis: drawingStep(request.text) }));
     }
     case "single limit":
-      return { outcome: "single limit", single: singleLimit(request.side, request.size.length, drawingStep(request.text)) };
+      return {
+        outcome: "single limit",
+        single: singleLimit(request.side, request.size.length, drawingStep(request.text)),
+      };
     case "plain":
       return found(byBlock(block, request, request.nominal));
     case "angle":
@@ -147,7 +162,10 @@ function resolve(request: CalloutRequest, feature: "hole" | "shaft" | undefined,
     case "reference":
       return { outcome: "no limits", reason: "a reference dimension is for information only" };
     case "basic":
-      return { outcome: "no limits", reason: "a basic dimension is theoretically exact; its tolerance stands in a frame" };
+      return {
+        outcome: "no limits",
+        reason: "a basic dimension is theoretically exact; its tolerance stands in a frame",
+      };
     case "thread":
       return { outcome: "no limits", reason: "a thread is governed by its own standard; no default tolerance applies" };
   }
@@ -181,10 +199,14 @@ function angleOf(request: CalloutRequest & { readonly kind: "angle" | "chamfer" 
 
 function needBlock(block: Block, text: string): TitleBlock | TitleBlockSpec {
   if (block !== undefined) return block;
-  throw new LimitsError("TITLE_BLOCK_MISSING", "a size without a tolerance falls to the title block, and there is none", {
-    value: text,
-    allowed: "a title block in the context, or a tolerance in the callout",
-  });
+  throw new LimitsError(
+    "TITLE_BLOCK_MISSING",
+    "a size without a tolerance falls to the title block, and there is none",
+    {
+      value: text,
+      allowed: "a title block in the context, or a tolerance in the callout",
+    },
+  );
 }
 
 function refuseOtherKind(toleranceClass: string, feature: "hole" | "shaft" | undefined): void {

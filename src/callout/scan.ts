@@ -10,9 +10,10 @@ export interface Token {
 
 const LONGEST_CALLOUT = 200;
 // one alternative a token, told apart by their first characters: no text takes more than one pass
-const TOKEN = /(\d+(?:[.,]\d*)?|[.,]\d+)|([A-Za-z\u00b5\u03bc]+(?:\.(?!\d))?)|(\+\/-|[⌀Ø□↧±×+\-\u2212\u2013()[\]/°'"′″#])|(\s+)/uy;
-// other than tab, line feed and carriage return, which are blanks
-const CONTROL = /[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f-\u009f]/u;
+const TOKEN =
+  /(\d+(?:[.,]\d*)?|[.,]\d+)|([A-Za-z\u00b5\u03bc]+(?:\.(?!\d))?)|(\+\/-|[⌀Ø□↧±×+\-\u2212\u2013()[\]/°'"′″#])|(\s+)/uy;
+// tab, line feed and carriage return are blanks, not control characters here
+const BLANKS = "\t\n\r";
 
 /** Cuts a callout into tokens, blanks dropped; a sign that no callout has is refused where it stands. */
 export function scan(text: string): readonly Token[] {
@@ -22,7 +23,7 @@ export function scan(text: string): readonly Token[] {
       allowed: `up to ${LONGEST_CALLOUT} characters`,
     });
   }
-  const control = text.search(CONTROL);
+  const control = findControl(text);
   if (control >= 0) {
     throw new LimitsError("CONTROL_CHARACTER", "a control character stands in the callout", {
       value: `U+${text.charCodeAt(control).toString(16).padStart(4, "0").toUpperCase()}`,
@@ -49,6 +50,15 @@ export function scan(text: string): readonly Token[] {
   while (tokens[0]?.kind === "line end") tokens.shift();
   if (tokens.length === 0) throw new LimitsError("TEXT_EMPTY", "there is no callout here", { value: text });
   return tokens;
+}
+
+/** Place of the first control character of either range, C0 or C1; -1 where there is none. */
+function findControl(text: string): number {
+  for (let place = 0; place < text.length; place++) {
+    const code = text.charCodeAt(place);
+    if ((code < 0x20 || (code >= 0x7f && code < 0xa0)) && !BLANKS.includes(text.charAt(place))) return place;
+  }
+  return -1;
 }
 
 function kindOf(match: RegExpExecArray): Token["kind"] | null {

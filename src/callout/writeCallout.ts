@@ -12,11 +12,13 @@ export interface CalloutStyle {
    * before the point, a plain 0.
    */
   readonly numbers: NumberStyle;
+  /** The decimal mark; `"."` unless said otherwise. */
   readonly decimalMark?: DecimalMark;
 }
 
 interface Writer {
   readonly numbers: NumberStyle;
+  /** The decimal mark; `"."` unless said otherwise. */
   readonly decimalMark: DecimalMark;
 }
 
@@ -34,7 +36,7 @@ const SHAPES: Readonly<Record<CalloutShape, string>> = {
  *
  * The decimals stay as they were written, for a title block goes by them; the style decides on everything else.
  *
- * @param request - what {@link readCallout} gave, also after JSON or `structuredClone`
+ * @param request - what `readCallout` gave, also after JSON or `structuredClone`
  * @param style - `numbers`: `"inch"` or `"metric"`, and the `decimalMark`
  * @returns the text; a size shows its unit (mm, in …) only where the drafter wrote it
  * @throws `OPTION_INVALID`, `CALLOUT_NOT_UNDERSTOOD` for what is no request
@@ -125,8 +127,14 @@ function isEven({ upper, lower }: { readonly upper: Length; readonly lower: Leng
 /** The number with the decimals it was written with, or its fraction; its unit where it was written. */
 function sizeText({ length, text, form, places, unitWritten }: WrittenDimension, writer: Writer): string {
   const unit = unitWritten ? unitText(length.unit) : "";
-  if (form === "fraction") return `${text.replace(/\s*-\s*|\s+/g, " ").replace(/\s*\/\s*/, "/")}${unit}`;
+  if (form === "fraction") return `${fractionText(text)}${unit}`;
   return `${decimalText(length, places, writer, writer.numbers)}${unit}`;
+}
+
+/** `7-3/8` and `7 3 / 8` are written `7 3/8`. */
+function fractionText(text: string): string {
+  const [first = "", second = "", third] = text.match(/\d+/g) ?? [];
+  return third === undefined ? `${first}/${second}` : `${first} ${second}/${third}`;
 }
 
 function unitText(unit: LengthUnit): string {
@@ -163,7 +171,10 @@ function deviationsText(
 }
 
 /** Two sizes, the larger one first; equal sizes stand once. */
-function pairText({ max, min }: { readonly max: WrittenDimension; readonly min: WrittenDimension }, writer: Writer): string {
+function pairText(
+  { max, min }: { readonly max: WrittenDimension; readonly min: WrittenDimension },
+  writer: Writer,
+): string {
   return `${sizeText(max, writer)}/${sizeText(min, writer)}`;
 }
 

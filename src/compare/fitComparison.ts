@@ -3,10 +3,10 @@ import type { InchBasis, InchClass, InchFitReading } from "../inchFits/index.js"
 import type { Fit } from "../limits/index.js";
 import type { Length } from "../units/index.js";
 
-/** What {@link compareFits} takes for a fit: a class of inch fits such as `"LN2"`, or an ISO fit such as `"H7/p6"`. */
+/** What `compareFits` takes for a fit: a class of inch fits such as `"LN2"`, or an ISO fit such as `"H7/p6"`. */
 export type JointFit = string | InchClass | FitClasses;
 
-/** Options of {@link compareFits}. */
+/** Options of `compareFits`. */
 export interface CompareOptions {
   /** How many fits of the other system to set beside it; 3 unless said otherwise. */
   readonly most?: number;

@@ -20,7 +20,9 @@ export interface GradeQuestion {
 
 /** One grade with its tolerance at the size. */
 export interface GradeAtSize<Grade> {
+  /** The grade. */
   readonly grade: Grade;
+  /** The tolerance. */
   readonly tolerance: Length;
 }
 
@@ -36,6 +38,7 @@ export interface GradeMatch<Grade> {
   readonly beyond: GradeAtSize<Grade> | null;
   /** Which processes reach the nearest grade, by both charts. */
   readonly processes: ProcessesForGrade;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 
@@ -57,7 +60,7 @@ const INCH_GRADES: readonly InchGrade[] = [4, 5, 6, 7, 8, 9, 10, 11, 12, 13];
  *
  * @param question - `size` and `tolerance`, any units
  * @returns the frozen matches of both systems: tolerances in µm (ISO) and thou (inch), processes by both charts
- * @throws `OPTION_INVALID` where size or tolerance is not over 0, `LENGTH_INVALID`, and what {@link readLength} throws
+ * @throws `OPTION_INVALID` where size or tolerance is not over 0, `LENGTH_INVALID`, and what `readLength` throws
  * @example
  * ```ts
  * import { gradeOfTolerance } from "limitsmith";
@@ -112,6 +115,7 @@ function numberOf(grade: GradeName): number {
 
 interface Candidate<Grade> extends GradeAtSize<Grade> {
   readonly number: number;
+  /** Where it comes from. */
   readonly basis: readonly BasisStep[];
 }
 

@@ -23,10 +23,13 @@ export interface AcceptanceQuestion {
 
 /** Whether measured values keep a limit. */
 export interface RoughnessAcceptance {
+  /** True where the surface passes. */
   readonly accepted: boolean;
+  /** The rule of acceptance. */
   readonly rule: RoughnessRule;
   /** The limits in the drawing's own unit, exactly. */
   readonly upper: Length | null;
+  /** Lower limit of roughness, where there is one. */
   readonly lower: Length | null;
   /** Number of measured values. */
   readonly measured: number;
@@ -36,6 +39,7 @@ export interface RoughnessAcceptance {
   readonly under: number;
   /** The rule and the count, in words. */
   readonly says: string;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 

@@ -10,9 +10,11 @@ export type TextureStandard = "ISO 1302:2002" | "ISO 21920-1:2021";
 
 /** Which rule a drawing means. */
 export interface AcceptanceRule {
+  /** The rule, by its name. */
   readonly rule: RoughnessRule;
   /** The rule in words. */
   readonly says: string;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 

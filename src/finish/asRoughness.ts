@@ -15,7 +15,7 @@ import type { Roughness, RoughnessData, RoughnessLike } from "./roughnessValue.j
  * @param path - keys that lead to the value in the caller's data, for the error
  * @returns the frozen roughness, in µm or µin as it was written
  * @throws `ROUGHNESS_INVALID`, `ROUGHNESS_PARAMETER_UNKNOWN`, `ROUGHNESS_GRADE_UNKNOWN`, `UNIT_MISSING`, and what
- *   {@link readLength} throws for a text
+ *   `readLength` throws for a text
  * @example
  * ```ts
  * import { asRoughness, microinch, roughness } from "limitsmith";

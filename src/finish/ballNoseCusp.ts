@@ -17,7 +17,9 @@ export interface BallNoseCusp {
   readonly cusp: Length;
   /** By the common short form: ae²/(8 R). */
   readonly cuspShortForm: Length;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

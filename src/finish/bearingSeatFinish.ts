@@ -25,7 +25,9 @@ export interface BearingSeatFinish {
   readonly ra: Length;
   /** Grade that was looked up. */
   readonly grade: "IT5" | "IT6" | "IT7";
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

@@ -86,7 +86,7 @@ function basisSteps(read: ReadRoughness, ra: Length, pair: Length | null, second
     steps.push({
       standard: "common practice",
       place: "instruments calibrated in RMS, sine-wave value",
-      says: `RMS reads about 1.11 times Ra: Ra ${shown(ra)}`,
+      says: `RMS reads about 1.11 times Ra: Ra about ${about(ra)}`,
       how: "common practice",
       mark: "two-sources",
     });
@@ -112,8 +112,8 @@ function markOfGrade(grade: string): "two-sources" | "memory" {
 function cautionsOf(read: ReadRoughness, value: Length): Caution[] {
   const cautions: Caution[] = [];
   if (read.parameter === "RMS") {
-    const least = shown(multiply(value, { numerator: 10, denominator: 13 }));
-    const most = shown(multiply(value, { numerator: 10, denominator: 11 }));
+    const least = about(multiply(value, { numerator: 10, denominator: 13 }));
+    const most = about(multiply(value, { numerator: 10, denominator: 11 }));
     cautions.push({
       code: "FINISH_RMS",
       says:
@@ -139,7 +139,7 @@ function cautionsOf(read: ReadRoughness, value: Length): Caution[] {
 /** 63 µm and 1.6 µin are possible, but the figure is a first-choice one of the other unit and far out in its own. */
 function looksLikeOtherUnit(value: Length): boolean {
   const figure = (unit: RoughnessUnit, other: RoughnessUnit): boolean =>
-    firstChoiceValues(other).some((one) => one.to(other) === value.to(unit)) &&
+    firstChoiceValues(other).some((one) => lengthIn(one.to(other), unit).ticks === value.ticks) &&
     !firstChoiceValues(unit).some((one) => one.ticks === value.ticks);
   return unitFor(value) === "um" ? value.to("um") >= 16 && figure("um", "uin") : figure("uin", "um");
 }
@@ -147,4 +147,9 @@ function looksLikeOtherUnit(value: Length): boolean {
 /** A length for reading: exact where it ends, else to four decimals. */
 function shown(length: Length): string {
   return writeLength(length, { places: 4, style: "metric" });
+}
+
+/** A length that is an estimate anyway: three decimals of µm, one of µin. */
+function about(length: Length): string {
+  return writeLength(length, { places: length.unit === "um" ? 3 : 1, style: "metric" });
 }

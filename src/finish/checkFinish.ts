@@ -21,9 +21,9 @@ export interface FinishQuestion {
   readonly tolerance?: LengthLike;
   /** Rule and form tolerance for the tolerance; `"Ra < T/8"` unless more is said. */
   readonly toleranceRule?: FinishForToleranceOptions;
-  /** Function of the surface, see {@link finishFunctions}. */
+  /** Function of the surface, see `finishFunctions`. */
   readonly function?: string;
-  /** Trade name of the last process, see {@link processNames}. */
+  /** Trade name of the last process, see `processNames`. */
   readonly process?: string;
   /** Tolerance grade that the process must hold. */
   readonly grade?: ToleranceGradeLike;
@@ -44,7 +44,7 @@ export interface FinishQuestion {
  * found.map((one) => one.code); // → ["FINISH_TOO_COARSE_FOR_TOLERANCE", "FINISH_TOO_COARSE_FOR_FUNCTION", "PROCESS_DOES_NOT_REACH_GRADE"]
  * checkFinish({ roughness: "0.8 µm", tolerance: "16 µm", function: "bearing seat", process: "grinding", grade: "IT6" }); // → []
  * ```
- * @reference as {@link finishForTolerance}, {@link finishForFunction}, {@link processFinish} and {@link processGrades}
+ * @reference as {@link finishForTolerance}, `finishForFunction`, `processFinish` and `processGrades`
  */
 export function checkFinish(question: FinishQuestion): readonly FinishFinding[] {
   const roughness = asRoughness(ownValue(question, "roughness") as RoughnessLike, ["roughness"]);

@@ -34,12 +34,15 @@ export interface WantedRoughness {
 export interface FeedForRoughness {
   /** Largest feed per revolution by the form, rounded down to the tick of 0.1 nm. */
   readonly feed: Length;
+  /** Which form was used. */
   readonly form: RaForm;
   /** Up to this feed only the nose cuts; `null` where no angle was given. */
   readonly largestFeed: Length | null;
   /** False where `feed` is over `largestFeed`: the form does not hold there; `null` where no angle was given. */
   readonly formHolds: boolean | null;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

@@ -16,9 +16,11 @@ export type FinishFindingCode =
 
 /** Something about a finish, its tolerance, function or process that a person should look at. */
 export interface FinishFinding {
+  /** Stable code; never changes its meaning. */
   readonly code: FinishFindingCode;
   /** The finding in words and figures. */
   readonly says: string;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 

@@ -16,8 +16,11 @@ export interface FunctionFinish {
   readonly coarsest: Length;
   /** True where `finest` is a limit of its own: a smoother surface fails too, as under a lip seal. */
   readonly finestIsLimit: boolean;
+  /** How sure the value is. */
   readonly mark: Mark;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

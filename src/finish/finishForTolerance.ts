@@ -18,6 +18,7 @@ export interface FinishForToleranceOptions {
 
 /** What one rule allows. */
 export interface AllowedFinish {
+  /** The rule, by its name. */
   readonly rule: ToleranceRuleName;
   /** Limit of Ra in µm or µin; `null` where the rule speaks of Rz only. */
   readonly ra: Length | null;
@@ -27,6 +28,7 @@ export interface AllowedFinish {
   readonly rz: Length | null;
   /** True where the roughness must stay below the limit, false where it may equal it. */
   readonly below: boolean;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 

@@ -18,7 +18,7 @@ export interface FunctionFindingsOptions {
  * limit that the function needs. Compared in the drawing's own unit.
  *
  * @param roughness - Ra with its unit, as an upper limit
- * @param name - function of the surface, see {@link finishFunctions}
+ * @param name - function of the surface, see `finishFunctions`
  * @param options - `lower`: the lower limit, where the drawing has one
  * @returns a frozen list, empty where nothing is to be said (no unit)
  * @throws `FINISH_FUNCTION_UNKNOWN`, and what {@link asRoughness} throws

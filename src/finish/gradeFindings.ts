@@ -9,7 +9,7 @@ import { processGrades } from "./processGrades.js";
  * than present machines: each finding is a warning.
  *
  * @param grade - `"IT01"` to `"IT18"`, or the number of a grade (no unit)
- * @param process - trade name, see {@link processNames}
+ * @param process - trade name, see `processNames`
  * @returns a frozen list of one finding or none; an empty list where no chart has the process
  * @throws `PROCESS_UNKNOWN`, `CLASS_GRADE_UNKNOWN`
  * @example

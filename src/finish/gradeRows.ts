@@ -8,6 +8,7 @@ export type GradeChart = "ANSI B4.1-1967 (R1987)" | "BS 4500 and ISO/R 286 famil
 
 /** What one line of a chart says. */
 export interface GradeSpan {
+  /** The chart that it stands in. */
   readonly chart: GradeChart;
   /** Line of the chart. */
   readonly row: string;

@@ -1,5 +1,6 @@
 /** Ratios of an ideal profile: plain numbers, to four decimals. */
 export interface IdealProfile {
+  /** The profile. */
   readonly profile: "sine" | "triangle" | "parabolic feed marks" | "square" | "Gaussian heights";
   /** Rq over Ra. */
   readonly rqOverRa: number;

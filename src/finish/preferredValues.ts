@@ -2,7 +2,7 @@ import type { Mark } from "../basis.js";
 import { lengthOfTicks } from "../units/index.js";
 import type { Length } from "../units/index.js";
 import type { RoughnessUnit } from "./roughnessValue.js";
-import { ASME_SERIES, R10_SERIES_UM } from "./tables/preferredRoughness.js";
+import { ASME_SECOND_CHOICE, R10_SERIES_UM } from "./tables/preferredRoughness.js";
 import { ROUGHNESS_GRADES } from "./tables/roughnessGrades.js";
 import type { GradeRow } from "./tables/roughnessGrades.js";
 
@@ -30,8 +30,8 @@ export function gradeRowOf(ticks: number, unit: RoughnessUnit): GradeRow | null 
 
 /** The partner of a second-choice value in the other unit: the inch series of ASME B46.1, from memory. */
 export function secondChoicePairOf(ticks: number, unit: RoughnessUnit): { value: Length; mark: Mark } | null {
-  const row = ASME_SERIES.find((one) => lengthIn(one[unit], unit).ticks === ticks);
-  if (row === undefined || gradeRowOf(ticks, unit) !== null) return null;
+  const row = ASME_SECOND_CHOICE.find((one) => lengthIn(one[unit], unit).ticks === ticks);
+  if (row === undefined) return null;
   return { value: unit === "um" ? uinLength(row.uin) : umLength(row.um), mark: "memory" };
 }
 
@@ -45,9 +45,16 @@ export function firstChoiceValues(unit: RoughnessUnit): readonly Length[] {
 
 /** All preferred values of a unit, finest first: first choice together with the longer series. */
 export function allPreferredValues(unit: RoughnessUnit): readonly Length[] {
-  const longer = unit === "um" ? R10_SERIES_UM.map(umLength) : ASME_SERIES.map((row) => uinLength(row.uin));
+  const longer = unit === "um" ? R10_SERIES_UM.map(umLength) : longerInchSeries();
   const all = new Map([...firstChoiceValues(unit), ...longer].map((one) => [one.ticks, one]));
   return [...all.values()].sort((left, right) => left.ticks - right.ticks);
+}
+
+/** The inch series of ASME B46.1 starts at 0.5 µin: the grades from N0, and the second choice between them. */
+function longerInchSeries(): readonly Length[] {
+  const finest = ROUGHNESS_GRADES.find((row) => row.uin !== null)?.uin ?? null;
+  const values = ASME_SECOND_CHOICE.map((row) => row.uin);
+  return (finest === null ? values : [finest, ...values]).map(uinLength);
 }
 
 /**
@@ -61,6 +68,6 @@ export function limitInUnit(um: number, unit: RoughnessUnit): Length {
 
 /** The µin value that tables set beside so many µm, of first or second choice; `null` where they have none. */
 export function pairedUin(um: number): Length | null {
-  const row = ROUGHNESS_GRADES.find((one) => one.um === um) ?? ASME_SERIES.find((one) => one.um === um);
+  const row = ROUGHNESS_GRADES.find((one) => one.um === um) ?? ASME_SECOND_CHOICE.find((one) => one.um === um);
   return row?.uin === undefined || row.uin === null ? null : uinLength(row.uin);
 }

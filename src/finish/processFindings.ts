@@ -9,7 +9,7 @@ import type { RoughnessLike } from "./roughnessValue.js";
  * finding is a warning.
  *
  * @param roughness - Ra with its unit, as an upper limit
- * @param process - trade name, see {@link processNames}
+ * @param process - trade name, see `processNames`
  * @returns a frozen list of one finding or none (no unit)
  * @throws `PROCESS_UNKNOWN`, and what {@link asRoughness} throws
  * @example

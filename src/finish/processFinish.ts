@@ -13,15 +13,21 @@ export interface BandEnd {
 
 /** The band of ordinary use. */
 export interface AverageBand {
+  /** Finest roughness of the range. */
   readonly finest: BandEnd;
+  /** Coarsest roughness of the range. */
   readonly coarsest: BandEnd;
+  /** How sure the value is. */
   readonly mark: Mark;
 }
 
 /** Ordinary and less frequent use together; `null` where the sources leave an end open. */
 export interface OverallBand {
+  /** Finest roughness of the range. */
   readonly finest: BandEnd | null;
+  /** Coarsest roughness of the range. */
   readonly coarsest: BandEnd | null;
+  /** How sure the value is. */
   readonly mark: Mark;
 }
 
@@ -31,18 +37,22 @@ export interface ProcessFinish {
   readonly process: string;
   /** Line of the chart that was read: turning reads `"boring, turning"`. */
   readonly row: string;
+  /** Group of processes in the chart. */
   readonly group: "removal" | "finishing" | "forming";
+  /** Range of average application. */
   readonly average: AverageBand;
   /** The less frequent bands are what lies in here and outside the average band, on both sides. */
   readonly overall: OverallBand;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 
 /**
  * What roughness average a process gives: the average band and, around it, the less frequent ones.
  *
- * @param process - trade name, see {@link processNames}: `"turning"`, `"milling"`, `"grinding"`; case does not matter
+ * @param process - trade name, see `processNames`: `"turning"`, `"milling"`, `"grinding"`; case does not matter
  * @returns the frozen bands, each end in µm with its partner in µin, each band with its mark
  * @throws `PROCESS_UNKNOWN`
  * @example

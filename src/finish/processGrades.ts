@@ -24,14 +24,16 @@ export interface ProcessGrades {
   readonly spans: readonly GradeSpan[];
   /** Tolerances in mm that one more table gives, without regard to size. */
   readonly tolerances: readonly ReachedTolerance[];
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 
 /**
  * The tolerance grades that a process reaches, by each published chart; the charts are never merged.
  *
- * @param process - trade name, see {@link processNames}: `"turning"`, `"honing"`, `"die casting"`
+ * @param process - trade name, see `processNames`: `"turning"`, `"honing"`, `"die casting"`
  * @returns the frozen lines of each chart as grade numbers (7 is IT7), and tolerances as lengths in mm
  * @throws `PROCESS_UNKNOWN`
  * @example

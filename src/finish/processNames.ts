@@ -2,12 +2,13 @@ import { allProcesses } from "./processes.js";
 
 /** A process by its trade name, and what is charted for it. */
 export interface KnownProcess {
+  /** Its name. */
   readonly name: string;
   /** Other names that mean the same. */
   readonly also: readonly string[];
-  /** True where {@link processFinish} has a line for it. */
+  /** True where `processFinish` has a line for it. */
   readonly hasFinish: boolean;
-  /** True where {@link processGrades} has a tolerance grade for it. */
+  /** True where `processGrades` has a tolerance grade for it. */
   readonly hasGrades: boolean;
 }
 

@@ -14,14 +14,16 @@ export interface ProcessReach {
   readonly reach: FinishReach;
   /** On which side of the average band the roughness lies; `null` within it. */
   readonly side: BandSide;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 
 /**
  * In which band of a process a roughness lies. There is no yes or no: the chart is informative.
  *
- * @param process - trade name, see {@link processNames}
+ * @param process - trade name, see `processNames`
  * @param roughness - Ra with its unit, over 0 up to 1 mm; compared in its own unit, 63 µin with the 63 µin of the chart
  * @returns the frozen class: `"average"`, `"less frequent"`, `"outside"` or `"not known"` (no unit), and its cautions
  * @throws `PROCESS_UNKNOWN`, and what {@link asRoughness} throws

@@ -12,9 +12,13 @@ export type GradeReach = "usual" | "finer than needed" | "not usual";
 export interface ProcessesForGrade {
   /** Number of the grade: 7 for IT7. */
   readonly grade: number;
+  /** Processes that usually hold it. */
   readonly usual: readonly GradeSpan[];
+  /** Processes that are finer than the grade needs. */
   readonly finerThanNeeded: readonly GradeSpan[];
+  /** Processes that do not usually hold it. */
   readonly notUsual: readonly GradeSpan[];
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

@@ -23,7 +23,7 @@ export interface RoughnessOptions {
  * @returns the frozen roughness: Ra as an exact length in its own unit, the exact conversion and the preferred partner
  *   in the other unit kept apart, grade, neighbours in the preferred series, cautions
  * @throws `ROUGHNESS_INVALID`, `ROUGHNESS_PARAMETER_UNKNOWN`, `ROUGHNESS_GRADE_UNKNOWN`, `UNIT_MISSING`, `OPTION_INVALID`,
- *   `TEXT_TOO_LONG`, and what {@link readLength} throws for a text
+ *   `TEXT_TOO_LONG`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { roughness } from "limitsmith";

@@ -33,10 +33,15 @@ export interface RoughnessFactor {
   readonly capped: boolean;
   /** `null` for materials other than steel. */
   readonly shear: ShearFactors | null;
+  /** Group of materials that the form is for. */
   readonly material: string;
+  /** Ultimate strength of the material. */
   readonly strength: Stress;
+  /** The Rz that belongs to it. */
   readonly rz: Length;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

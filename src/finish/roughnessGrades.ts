@@ -15,6 +15,7 @@ export interface RoughnessGrade {
   readonly firstChoice: boolean;
   /** Which of the two is the narrower limit, taken exactly; `null` where one is missing. */
   readonly tighter: "um" | "uin" | null;
+  /** How sure the value is. */
   readonly mark: Mark;
 }
 

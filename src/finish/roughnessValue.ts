@@ -21,6 +21,7 @@ export interface Roughness {
   readonly value: Length;
   /** The drawing's own unit, in which it is compared; JSON of a length may lose it. */
   readonly unit: RoughnessUnit;
+  /** The roughness parameter. */
   readonly parameter: RoughnessParameter;
   /** True where the note says max: the maximum rule holds. */
   readonly max: boolean;
@@ -38,16 +39,21 @@ export interface Roughness {
   readonly finer: PreferredNeighbour;
   /** The next rougher preferred values. */
   readonly coarser: PreferredNeighbour;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 
 /** A roughness as bare data: what comes back from JSON or a worker. */
 export interface RoughnessData {
+  /** The number as it stands, with its unit. */
   readonly value: LengthLike;
   /** That of `value` unless said otherwise: metric lengths go by µm, inch lengths by µin. */
   readonly unit?: RoughnessUnit;
+  /** The roughness parameter. */
   readonly parameter?: RoughnessParameter;
+  /** True for the maximum rule. */
   readonly max?: boolean;
 }
 

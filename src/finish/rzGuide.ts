@@ -4,13 +4,14 @@ import { RZ_GUIDE } from "./tables/roughnessFactors.js";
 
 /** An Rz to start from where a surface has none. */
 export interface RzGuideValue {
+  /** What surface it is. */
   readonly surface: string;
   /** In µm. */
   readonly rz: Length;
 }
 
 /**
- * Guide values of Rz for {@link roughnessFactor} where the drawing gives none. They are far coarser than real machined
+ * Guide values of Rz for `roughnessFactor` where the drawing gives none. They are far coarser than real machined
  * surfaces: use the drawing's value where there is one.
  *
  * @returns a frozen list, Rz in µm

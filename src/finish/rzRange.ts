@@ -10,14 +10,19 @@ import { RZ_RANGES, RZ_VALUES } from "./tables/rzRanges.js";
 
 /** A range of lengths. */
 export interface LengthRange {
+  /** The least. */
   readonly least: Length;
+  /** The most. */
   readonly most: Length;
 }
 
 /** What one published set gives beside an Ra. */
 export interface RzEstimate {
+  /** Whose figures they are. */
   readonly source: string;
+  /** The Rz that belongs to it. */
   readonly rz: LengthRange;
+  /** How sure the value is. */
   readonly mark: Mark;
 }
 
@@ -33,7 +38,9 @@ export interface RzRange {
   readonly estimates: readonly RzEstimate[];
   /** All sets together. */
   readonly widest: LengthRange;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

@@ -23,6 +23,7 @@ export type SamplingStandard = "ISO 4288:1996" | "ISO 21920-3:2021" | "ASME B46.
 
 /** By what the sampling length is chosen: exactly one of `ra`, `rz` and `rsm`. */
 export interface SamplingQuestion {
+  /** Standard with its edition. */
   readonly standard: SamplingStandard;
   /** Ra of a surface without periodic marks, specified or measured. */
   readonly ra?: RoughnessLike;
@@ -38,12 +39,14 @@ export interface SamplingLengths {
   readonly samplingLength: Length;
   /** Evaluation length, as the table has it: about five sampling lengths. */
   readonly evaluationLength: Length;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 
 /** A table with the units of its columns. */
 interface Choice {
   readonly table: SamplingTable;
+  /** Standard with its edition. */
   readonly standard: string;
   readonly bound: (value: number) => Length;
   readonly length: (value: number) => Length;

@@ -16,9 +16,13 @@ export interface SharpToolCut {
 
 /** Heights of a surface of straight flanks. */
 export interface SharpToolRoughness {
+  /** Theoretical total height. */
   readonly rt: Length;
+  /** Theoretical Ra. */
   readonly ra: Length;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

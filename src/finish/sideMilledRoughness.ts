@@ -20,11 +20,15 @@ export interface SideMillingCut {
 
 /** Heights of a side-milled surface. */
 export interface SideMilledRoughness {
+  /** Theoretical total height. */
   readonly rt: Length;
   /** Ra of a row of such arcs: Rt × 4/(9 √3). */
   readonly ra: Length;
+  /** Which form was used. */
   readonly form: "arc" | "tooth path, up milling" | "tooth path, down milling";
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

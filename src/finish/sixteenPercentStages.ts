@@ -5,11 +5,13 @@ import type { RoughnessLike } from "./roughnessValue.js";
 
 /** How far the short procedure has come. */
 export interface StagedAcceptance {
+  /** What the stage decides. */
   readonly decision: "accepted" | "rejected" | "measure more";
   /** Number of values that the decision rests on. */
   readonly after: number;
   /** The stage that decided, in words. */
   readonly says: string;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 

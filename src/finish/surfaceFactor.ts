@@ -8,6 +8,7 @@ import type { SurfaceCondition, SurfaceFactorSet } from "./tables/surfaceFactors
 
 /** What the surface factor needs. */
 export interface SurfaceFactorQuestion {
+  /** The finish of the surface. */
   readonly finish: SurfaceCondition;
   /** The minimum ultimate tensile strength that the certificate or the order promises; over 0 up to 4000 MPa. */
   readonly minimumUltimateStrength: StressLike;
@@ -21,17 +22,23 @@ export interface SurfaceFactor {
   readonly factor: number;
   /** True where the formula gives more than 1 and the cap holds. */
   readonly capped: boolean;
+  /** The set of coefficients, by its name. */
   readonly set: SurfaceFactorSet;
+  /** The finish of the surface. */
   readonly finish: SurfaceCondition;
+  /** Ultimate strength of the material. */
   readonly strength: Stress;
   /** Coefficient a, for the unit beside it. */
   readonly a: number;
   /** The unit of strength that `a` belongs to. */
   readonly aUnit: "MPa" | "ksi";
+  /** Exponent of the set. */
   readonly b: number;
   /** Coefficient of variation; stochastic set only, `null` elsewhere. */
   readonly variation: number | null;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

@@ -3,16 +3,21 @@ import { LAY_SYMBOLS, REMOVAL_SYMBOLS, SYMBOL_POSITIONS } from "./tables/surface
 
 /** A sign of a surface-texture symbol. */
 export interface TextureSign {
+  /** The sign. */
   readonly symbol: string;
   /** How a text writes it, where that differs; `null` elsewhere. */
   readonly text: string | null;
+  /** What it means. */
   readonly meaning: string;
+  /** How sure the value is. */
   readonly mark: Mark;
 }
 
 /** What stands at one letter of the symbol. */
 export interface TexturePosition {
+  /** The place in the symbol. */
   readonly position: string;
+  /** What it means. */
   readonly meaning: string;
 }
 

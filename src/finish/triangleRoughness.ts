@@ -19,6 +19,7 @@ export interface TriangleRoughness {
   readonly ra: Length;
   /** In µm: the old ten-point height. */
   readonly rz: Length;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 

@@ -36,7 +36,9 @@ export interface TheoreticalRoughness {
   readonly rq: Length;
   /** Up to this feed only the nose cuts: 2 r sin Ce; `null` where no angle was given. */
   readonly largestFeed: Length | null;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

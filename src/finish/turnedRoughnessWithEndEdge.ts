@@ -27,10 +27,13 @@ export interface EndEdgeCut {
 
 /** Peak to valley of a nose with its end cutting edge. */
 export interface EndEdgeRoughness {
+  /** Theoretical total height. */
   readonly rt: Length;
   /** What cuts: the nose alone, or the nose and the straight end edge behind it. */
   readonly form: "circle" | "circle and end cutting edge";
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

@@ -47,10 +47,7 @@ export function inchClassesFor(limits: LimitsLike, options?: ClassesForOptions):
   const found = [holeBasis, shaftBasis].flatMap((classes, order) =>
     classes.flatMap(({ cls, at, sure }) =>
       kinds.flatMap((kind) => {
-        const exact =
-          kind === "hole"
-            ? limitsAt(size, at.hole)
-            : limitsAt(size, at.shaft);
+        const exact = kind === "hole" ? limitsAt(size, at.hole) : limitsAt(size, at.shaft);
         const match = matchLimits(given, exact, printed);
         const standing = 2 * order + (sure ? 0 : 1);
         return match === null ? [] : [{ standing, match: Object.freeze({ fitClass: cls, kind, ...match }) }];

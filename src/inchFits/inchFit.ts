@@ -40,12 +40,7 @@ export function inchFit(size: LengthLike, fitClass: InchClassLike, options?: Inc
   const cls = withBasis(parseInchClass(fitClass), options);
   const nominal = asLength(size);
   const at = fitAtSize(cls, nominal.ticks, readingOf(options));
-  const fit = makeFit(
-    limitsAt(nominal, at.hole),
-    limitsAt(nominal, at.shaft),
-    at.cautions,
-    at.clearances,
-  );
+  const fit = makeFit(limitsAt(nominal, at.hole), limitsAt(nominal, at.shaft), at.cautions, at.clearances);
   const { symbols, printedLimits, purpose, reading } = at;
   // written out: spreading one object into another costs more than the rest of the fit
   return Object.freeze({

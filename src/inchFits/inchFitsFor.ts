@@ -8,7 +8,7 @@ import { inchCandidates } from "./inchCandidates.js";
 import { inchFit } from "./inchFit.js";
 import type { InchFit } from "./inchFitValue.js";
 
-/** What {@link inchFitsFor} and {@link inchFitsNear} are asked. */
+/** What {@link inchFitsFor} and `inchFitsNear` are asked. */
 export interface InchFitQuestion {
   /** Basic size. */
   readonly size: LengthLike;

@@ -6,7 +6,7 @@ import { USUAL_READING, inchFitReadings } from "./inchFitReadings.js";
 import type { InchFitReading } from "./inchFitReadings.js";
 import { parseInchClass } from "./parseInchClass.js";
 
-/** Options of {@link inchFit}. */
+/** Options of `inchFit`. */
 export interface InchFitOptions {
   /**
    * `"hole"` (as the tables have it), `"shaft"` (suffix S: the largest shaft is the basic size) or `"bilateral hole"`

@@ -9,7 +9,7 @@ import type { InchSizeSeries } from "./preferredInchSizes.js";
  * @param size - any length, in any unit; only an exact match counts
  * @param series - `"decimal"` or `"fractional"` (no unit); either one unless said otherwise
  * @returns true where the size stands in the series (no unit)
- * @throws `OPTION_INVALID`, `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `OPTION_INVALID`, `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { inch, isPreferredInchSize } from "limitsmith";

@@ -7,7 +7,7 @@ import { preferredInchTolerances } from "./preferredInchTolerances.js";
  *
  * @param tolerance - a tolerance or an allowance, in any unit; only an exact match counts
  * @returns true where it stands in the series (no unit)
- * @throws `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { isPreferredInchTolerance, thou } from "limitsmith";

@@ -11,7 +11,7 @@ import type { NearestPreferred } from "./series.js";
  * @param size - a length within the series (0.01 to 20 in; the fractional one starts at 1/64 in), in any unit
  * @param series - `"decimal"` or `"fractional"` (no unit); both together unless said otherwise
  * @returns frozen `{ nearest, difference, below, above, basis }`, lengths in inches; half way, the smaller is nearest
- * @throws `INCH_SERIES_OUT_OF_RANGE`, `OPTION_INVALID`, `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `INCH_SERIES_OUT_OF_RANGE`, `OPTION_INVALID`, `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { inch, nearestPreferredInchSize } from "limitsmith";

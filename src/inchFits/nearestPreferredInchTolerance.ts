@@ -9,7 +9,7 @@ import type { NearestPreferred } from "./series.js";
  *
  * @param tolerance - a tolerance or an allowance from 0.1 to 250 thou, in any unit
  * @returns frozen `{ nearest, difference, below, above, basis }`, lengths in thou; half way, the smaller is nearest
- * @throws `INCH_SERIES_OUT_OF_RANGE`, `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `INCH_SERIES_OUT_OF_RANGE`, `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { nearestPreferredInchTolerance, thou } from "limitsmith";

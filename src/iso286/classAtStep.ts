@@ -54,12 +54,7 @@ function workOut(cls: ToleranceClass, stepIndex: number, options: ChosenIsoOptio
       upperDeviationUm: upperTicks / TICKS_PER_UM,
       lowerDeviationUm: lowerTicks / TICKS_PER_UM,
     }),
-    set: deviationSet(
-      lengthOfTicks(upperTicks, "um"),
-      lengthOfTicks(lowerTicks, "um"),
-      Object.freeze(basis),
-      cls.text,
-    ),
+    set: deviationSet(lengthOfTicks(upperTicks, "um"), lengthOfTicks(lowerTicks, "um"), Object.freeze(basis), cls.text),
   };
 }
 
@@ -80,7 +75,12 @@ function evenGradeStep(cls: ToleranceClass, evenUm: number): BasisStep {
   });
 }
 
-function otherLimitStep(cls: ToleranceClass, deviation: Fundamental, upperTicks: number, lowerTicks: number): BasisStep {
+function otherLimitStep(
+  cls: ToleranceClass,
+  deviation: Fundamental,
+  upperTicks: number,
+  lowerTicks: number,
+): BasisStep {
   const shaft = cls.kind === "shaft";
   const [upperName, lowerName] = shaft ? ["es", "ei"] : ["ES", "EI"];
   const upper = `${upperTicks / TICKS_PER_UM} µm`;

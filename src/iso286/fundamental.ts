@@ -25,9 +25,7 @@ export interface Fundamental {
 
 const toH: ReadonlyMap<string, DeviationColumn> = new Map(Object.entries(SHAFTS_A_TO_H));
 const fromK: ReadonlyMap<string, DeviationColumn> = new Map(Object.entries(SHAFTS_K_TO_ZC));
-const ofJ: ReadonlyMap<string, DeviationColumn> = new Map(
-  Object.entries({ ...SHAFTS_J, ...HOLES_J }),
-);
+const ofJ: ReadonlyMap<string, DeviationColumn> = new Map(Object.entries({ ...SHAFTS_J, ...HOLES_J }));
 
 // main steps 0 (to 3 mm) to 12 (400 to 500 mm): delta applies between them
 const FIRST_DELTA_STEP = 1;
@@ -62,7 +60,12 @@ function toHDeviation(cls: ToleranceClass, column: DeviationColumn, step: SizeSt
     throw notDefined(cls, step, "is not defined up to 1 mm in any grade", `${cls.letter} over 1 up to 500 mm`);
   }
   if (edition === "1988" && small.length === 2 && step.main >= STEPS_TO_10_MM) {
-    throw notDefined(cls, step, "ends at 10 mm in the 1988 edition", `${cls.letter} up to 10 mm; to 50 mm in edition 2010`);
+    throw notDefined(
+      cls,
+      step,
+      "ends at 10 mm in the 1988 edition",
+      `${cls.letter} up to 10 mm; to 50 mm in edition 2010`,
+    );
   }
   const { um, mark } = columnValue(cls, column, step);
   const place = `Table ${cls.kind === "shaft" ? 4 : 2}, ${stepText(step, column.steps)}`;
@@ -103,7 +106,13 @@ function jDeviation(cls: ToleranceClass, step: SizeStep): Fundamental {
   }
   const { um, mark } = columnValue(cls, column, step);
   const place = `Table ${shaft ? 4 : 2}, ${stepText(step, column.steps)}`;
-  return tabulated(shaft ? "lower" : "upper", um, place, `${cls.text}: ${shaft ? "ei" : "ES"} = ${signed(um)} µm`, mark);
+  return tabulated(
+    shaft ? "lower" : "upper",
+    um,
+    place,
+    `${cls.text}: ${shaft ? "ei" : "ES"} = ${signed(um)} µm`,
+    mark,
+  );
 }
 
 /** k to zc give ei. */
@@ -158,13 +167,7 @@ function deltaOf(grade: number, step: SizeStep): number {
   return column[step.main - FIRST_DELTA_STEP] ?? 0;
 }
 
-function withDelta(
-  cls: ToleranceClass,
-  um: number,
-  deltaUm: number,
-  place: string,
-  mark: string,
-): Fundamental {
+function withDelta(cls: ToleranceClass, um: number, deltaUm: number, place: string, mark: string): Fundamental {
   const says = `${cls.text}: ES = ${signed(um)} + delta ${deltaUm} = ${signed(um + deltaUm)} µm`;
   return { ...tabulated("upper", um + deltaUm, `${place}, with delta for ${cls.grade}`, says, mark), deltaUm };
 }

@@ -30,7 +30,7 @@ export interface FundamentalDeviation {
  * @param toleranceClass - such as `"m6"` or `"P7"`
  * @param options - `edition`, see {@link IsoOptions}
  * @returns frozen `{ limit, deviation, delta, basis }`, both lengths in µm
- * @throws what {@link isoLimits} throws
+ * @throws what `isoLimits` throws
  * @example
  * ```ts
  * import { fundamentalDeviation, mm } from "limitsmith";

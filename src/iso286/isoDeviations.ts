@@ -26,7 +26,11 @@ import { stepIndexOf } from "./sizeStep.js";
  * @reference ISO 286-1:2010, Tables 1 to 5 and 4.3: a to h: ei = es − IT; k to zc: es = ei + IT; js: ±IT/2;
  *   holes mirror the shaft, K to ZC with delta over 3 up to 500 mm
  */
-export function isoDeviations(size: LengthLike, toleranceClass: ToleranceClassLike, options?: IsoOptions): DeviationsUm {
+export function isoDeviations(
+  size: LengthLike,
+  toleranceClass: ToleranceClassLike,
+  options?: IsoOptions,
+): DeviationsUm {
   const cls = parsedClass(toleranceClass);
   return classAtStep(cls, stepIndexOf(asLength(size).ticks), isoOptions(options)).um;
 }

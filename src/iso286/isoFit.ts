@@ -23,7 +23,7 @@ const clearances: WeakMap<ClassAtStep, Map<ClassAtStep, FitClearances>> = new We
  * @param fit - `"H7/m6"`, `"H7-m6"`, or `{ hole, shaft }`: one hole class and one shaft class
  * @param options - `edition` and `jsRounding`, see {@link IsoOptions}
  * @returns the frozen fit: limits in the unit of `size`, clearances in µm, signed (negative is interference)
- * @throws `FIT_MALFORMED`, `FIT_NOT_HOLE_AND_SHAFT`, and what {@link isoLimits} throws
+ * @throws `FIT_MALFORMED`, `FIT_NOT_HOLE_AND_SHAFT`, and what `isoLimits` throws
  * @example
  * ```ts
  * import { isoFit, mm } from "limitsmith";

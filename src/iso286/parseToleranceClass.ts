@@ -9,7 +9,10 @@ export type ToleranceClassLike = string | ToleranceClass;
 
 const known: Map<string, ParsedClass> = new Map<string, ParsedClass>();
 const gradeNames: ReadonlySet<string> = new Set(GRADES);
-const letters: ReadonlySet<string> = new Set([...SHAFT_LETTERS, ...SHAFT_LETTERS.map((letter) => letter.toUpperCase())]);
+const letters: ReadonlySet<string> = new Set([
+  ...SHAFT_LETTERS,
+  ...SHAFT_LETTERS.map((letter) => letter.toUpperCase()),
+]);
 const LONGEST_CLASS = 40;
 const CLASS = /^([a-z]{1,2})(\d{1,2})$/i;
 

@@ -1,7 +1,25 @@
 /** Standard tolerance grades, IT01 to IT18. */
 export type GradeName =
-  | "IT01" | "IT0" | "IT1" | "IT2" | "IT3" | "IT4" | "IT5" | "IT6" | "IT7" | "IT8"
-  | "IT9" | "IT10" | "IT11" | "IT12" | "IT13" | "IT14" | "IT15" | "IT16" | "IT17" | "IT18";
+  | "IT01"
+  | "IT0"
+  | "IT1"
+  | "IT2"
+  | "IT3"
+  | "IT4"
+  | "IT5"
+  | "IT6"
+  | "IT7"
+  | "IT8"
+  | "IT9"
+  | "IT10"
+  | "IT11"
+  | "IT12"
+  | "IT13"
+  | "IT14"
+  | "IT15"
+  | "IT16"
+  | "IT17"
+  | "IT18";
 
 /** A tolerance class such as m6 or H7, taken apart. */
 export interface ToleranceClass {
@@ -16,12 +34,14 @@ export interface ToleranceClass {
 }
 
 /** All grades, finest first. */
+// prettier-ignore
 export const GRADES: readonly GradeName[] = [
   "IT01", "IT0", "IT1", "IT2", "IT3", "IT4", "IT5", "IT6", "IT7", "IT8",
   "IT9", "IT10", "IT11", "IT12", "IT13", "IT14", "IT15", "IT16", "IT17", "IT18",
 ];
 
 /** All letters of shafts, loosest first. */
+// prettier-ignore
 export const SHAFT_LETTERS: readonly string[] = [
   "a", "b", "c", "cd", "d", "e", "ef", "f", "fg", "g", "h", "js", "j", "k",
   "m", "n", "p", "r", "s", "t", "u", "v", "x", "y", "z", "za", "zb", "zc",

@@ -16,6 +16,16 @@ export interface KeyseatLike {
   readonly sideDepth?: LimitsLike | null;
 }
 
+/** The limits of a key as a caller gives them. */
+export interface KeyLimitsLike {
+  /** Width of the key. */
+  readonly width: LimitsLike;
+  /** Height of the key; of a taper key at its thick end. */
+  readonly height: LimitsLike;
+  /** Rise over run of a taper key; `null` or absent for a parallel one. */
+  readonly taper?: Ratio | null;
+}
+
 /** The parts of a keyed joint. */
 export interface KeyedParts {
   /** Diameter of the shaft. */
@@ -23,8 +33,10 @@ export interface KeyedParts {
   /** Diameter of the bore. */
   readonly bore: LimitsLike;
   /** Limits of the key, such as `inchKey(…).barStock` or `metricKey(…).limits`. */
-  readonly key: { readonly width: LimitsLike; readonly height: LimitsLike; readonly taper?: Ratio | null };
+  readonly key: KeyLimitsLike;
+  /** The keyseat in the shaft. */
   readonly shaftKeyseat: KeyseatLike;
+  /** The keyseat in the hub. */
   readonly hubKeyseat: KeyseatLike;
 }
 

@@ -8,14 +8,19 @@ export interface StackTerm {
   readonly name: string;
   /** Whether it adds to the sum or takes away. */
   readonly sign: "+" | "-";
+  /** The size. */
   readonly value: Length;
 }
 
 /** A gap or height at its two limits, each with the chain of terms that made it; the signed terms add up to it. */
 export interface StackRange {
+  /** Upper limit. */
   readonly max: Length;
+  /** Lower limit. */
   readonly min: Length;
+  /** The terms that add up to the upper limit. */
   readonly maxChain: readonly StackTerm[];
+  /** The terms that add up to the lower limit. */
   readonly minChain: readonly StackTerm[];
 }
 
@@ -27,6 +32,7 @@ export type BearingVerdict = "always bears" | "may not bear" | "cannot bear";
 
 /** One thing that was found about a keyed joint. */
 export interface AssemblyFinding {
+  /** Stable code; it never changes its meaning. */
   readonly code:
     | "SIDE_INTERFERES"
     | "SIDE_NOT_GIVEN"
@@ -38,7 +44,26 @@ export interface AssemblyFinding {
     | "SHAFT_PRESSES";
   /** Where: the sides in shaft or hub, the top, the shaft in its bore. */
   readonly place: "shaft" | "hub" | "top" | "bore";
+  /** In words, with sizes. */
   readonly says: string;
+}
+
+/** How far a taper key stops short of its full depth. */
+export interface TakeUp {
+  /** At the most. */
+  readonly max: Length;
+  /** At the least; negative where it goes past it. */
+  readonly min: Length;
+}
+
+/** The room over a key, by where the shaft is in its bore. */
+export interface TopClearance {
+  /** Shaft pushed away from the key: it touches the bore on the opposite side. */
+  readonly away: StackRange;
+  /** Shaft in the middle of the bore. */
+  readonly centred: StackRange;
+  /** Shaft pushed toward the key by all its play. */
+  readonly toward: StackRange;
 }
 
 /** How a key, its shaft and its hub go together: plain frozen data; clearance is positive, interference negative. */
@@ -50,14 +75,7 @@ export interface KeyedAssembly {
   /** Clearance at the sides of the key in the hub; `null` where the width of the seat is not given. */
   readonly sideInHub: StackRange | null;
   /** Clearance over the key, which lies on the floor of the shaft keyseat. */
-  readonly top: {
-    /** Shaft pushed away from the key: it touches the bore on the opposite side. */
-    readonly away: StackRange;
-    /** Shaft in the middle of the bore. */
-    readonly centred: StackRange;
-    /** Shaft pushed toward the key by all its play. */
-    readonly toward: StackRange;
-  };
+  readonly top: TopClearance;
   /** From the opposite side of the shaft over the key: what a micrometer reads. */
   readonly overKey: StackRange;
   /** How high the key stands over the crown of the shaft. */
@@ -72,13 +90,17 @@ export interface KeyedAssembly {
    * For a taper key: how far it stops short of its full depth when driven home, negative where it goes past it;
    * `null` for a parallel key.
    */
-  readonly takeUp: { readonly max: Length; readonly min: Length } | null;
+  readonly takeUp: TakeUp | null;
   /** On the key in its seats; whether the shaft must be pressed into the bore is in `fit`. */
   readonly assembles: AssemblyVerdict;
   /** True where the key is loose in the shaft at some corner and has room to rise. */
   readonly canLift: boolean;
+  /** Whether the flanks of the key find a wall. */
   readonly bears: BearingVerdict;
+  /** What was found, with sizes, in words. */
   readonly findings: readonly AssemblyFinding[];
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }

@@ -3,7 +3,7 @@ import { lengthOfTicks } from "../units/index.js";
 import { WOODRUFF_KEYS } from "./tables/woodruffKeys.js";
 import type { WoodruffNumber } from "./woodruffValue.js";
 
-const NUMBER = /^(\d{1,2})(\d{2})(\.5)?(-1)?$/;
+const NUMBER = /^([1-9]\d?)(\d{2})(\.5)?(-1)?$/;
 // ticks of 0.1 nm
 const THIRTY_SECOND = 7_937_500;
 const SIXTEENTH = 15_875_000;

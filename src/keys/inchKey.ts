@@ -8,7 +8,7 @@ import { chooseInchKey } from "./inchKeySize.js";
 import type { ChosenInchKey, InchKeyChoice } from "./inchKeySize.js";
 import { NOT_STANDARD } from "./keyCautions.js";
 import { B17_1, deviationsText, keyStep } from "./keyStep.js";
-import type { InchKey, KeyLimits } from "./keyValue.js";
+import type { GibHead, InchKey, KeyLimits } from "./keyValue.js";
 import { tableInch } from "./tableLength.js";
 import { INCH_GIB_HEADS } from "./tables/inchGibHeads.js";
 import { INCH_KEY_TOLERANCES } from "./tables/inchKeyTolerances.js";
@@ -140,7 +140,7 @@ function stockLimits(chosen: ChosenInchKey, size: BasisStep, table: keyof typeof
   });
 }
 
-function gibHead(height: Length): { readonly height: Length; readonly length: Length } {
+function gibHead(height: Length): GibHead {
   const row = INCH_GIB_HEADS.find(([listed]) => tableInch(listed).ticks === height.ticks);
   if (row !== undefined) return Object.freeze({ height: tableInch(row[1]), length: tableInch(row[2]) });
   return Object.freeze({

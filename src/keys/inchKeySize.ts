@@ -2,8 +2,8 @@ import { LimitsError } from "../errors.js";
 import { markOf } from "../basis.js";
 import type { Mark } from "../basis.js";
 import { ownValue } from "../ownValue.js";
-import type { Length, LengthLike } from "../units/index.js";
-import type { InchKeyKind, KeyShape } from "./keyValue.js";
+import type { Length } from "../units/index.js";
+import type { InchKeyKind, KeySectionLike, KeyShape } from "./keyValue.js";
 import { oneOf } from "./oneOf.js";
 import { positiveLength } from "./positiveLength.js";
 import { tableInch } from "./tableLength.js";
@@ -16,7 +16,7 @@ export interface InchKeyChoice {
   /** `"parallel"` unless said otherwise. */
   readonly kind?: InchKeyKind;
   /** A key of your own in place of the listed one; it is computed and marked as not standard. */
-  readonly key?: { readonly width: LengthLike; readonly height: LengthLike };
+  readonly key?: KeySectionLike;
 }
 
 /** A choice with everything decided. */
@@ -86,7 +86,7 @@ const KINDS: readonly InchKeyKind[] = ["parallel", "taper", "gib-head"];
 const SHAPES: readonly KeyShape[] = ["square", "rectangular"];
 
 function sectionOf(
-  own: NonNullable<InchKeyChoice["key"]>,
+  own: KeySectionLike,
   wanted: KeyShape | undefined,
 ): { readonly shape: KeyShape; readonly width: Length; readonly height: Length } {
   const width = positiveLength(ownValue(own, "width"), "the width of the key", ["key", "width"]);

@@ -19,7 +19,7 @@ import { oneOf } from "./oneOf.js";
 import { positiveLength } from "./positiveLength.js";
 import { tableInch } from "./tableLength.js";
 import { INCH_KEYSEAT_LEAD, INCH_KEYSEAT_OFFSET } from "./tables/inchAlignment.js";
-import { INCH_FILLETS } from "./tables/inchFillets.js";
+import { INCH_FILLETS, INCH_FILLETS_OVER } from "./tables/inchFillets.js";
 import { INCH_DEPTH_DEVIATIONS, INCH_KEYSEAT_WIDTHS } from "./tables/inchKeyseatWidths.js";
 import { INCH_SET_SCREWS } from "./tables/inchSetScrews.js";
 
@@ -172,16 +172,13 @@ function control(
 }
 
 function cornersOf(depth: Length): InchKeyseat["corners"] {
-  const row = INCH_FILLETS.find(([over, to]) => isIn(depth, over, to));
-  return row === undefined ? null : Object.freeze({ radius: tableInch(row[2]), chamfer: tableInch(row[3]) });
+  if (depth.ticks <= tableInch(INCH_FILLETS_OVER).ticks) return null;
+  const row = INCH_FILLETS.find(([to]) => depth.ticks <= tableInch(to).ticks);
+  return row === undefined ? null : Object.freeze({ radius: tableInch(row[1]), chamfer: tableInch(row[2]) });
 }
 
 function setScrewOf(shaft: Length): string | null {
-  return INCH_SET_SCREWS.find(([over, to]) => isIn(shaft, over, to))?.[3] ?? null;
-}
-
-function isIn(length: Length, over: string, to: string): boolean {
-  return length.ticks > tableInch(over).ticks && length.ticks <= tableInch(to).ticks;
+  return INCH_SET_SCREWS.find(([to]) => shaft.ticks <= tableInch(to).ticks)?.[1] ?? null;
 }
 
 function leadOf(length: Length): Length {

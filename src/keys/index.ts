@@ -1,4 +1,4 @@
-export type { KeyedParts, KeyseatLike } from "./assemblyParts.js";
+export type { KeyedParts, KeyLimitsLike, KeyseatLike } from "./assemblyParts.js";
 export type {
   AssemblyFinding,
   AssemblyVerdict,
@@ -6,6 +6,8 @@ export type {
   KeyedAssembly,
   StackRange,
   StackTerm,
+  TakeUp,
+  TopClearance,
 } from "./assemblyValue.js";
 export { keyseatCrown } from "./crown.js";
 export { decodeWoodruffNumber } from "./decodeWoodruffNumber.js";
@@ -16,7 +18,7 @@ export { inchKeyseat } from "./inchKeyseat.js";
 export type { InchKeyseatOptions } from "./inchKeyseat.js";
 export { keyedAssembly } from "./keyedAssembly.js";
 export { keyLoad } from "./keyLoad.js";
-export type { KeyLoadParts } from "./keyLoad.js";
+export type { KeyAllowables, KeyLoadParts, KeyMaterials } from "./keyLoad.js";
 export type {
   BearingAllowables,
   KeyEnds,
@@ -31,10 +33,19 @@ export { keyseatControl } from "./keyseatControl.js";
 export { keyseatFindings } from "./keyseatFindings.js";
 export type { KeyseatFinding, PrintedKeyseat } from "./keyseatFindings.js";
 export { keyseatRows } from "./keyseatRows.js";
-export type { KeyseatRow, KeyseatRows, KeyseatSpec } from "./keyseatRows.js";
+export type {
+  InchKeyseatSpec,
+  KeyseatPlace,
+  KeyseatRow,
+  KeyseatRows,
+  KeyseatSpec,
+  MetricKeyseatSpec,
+  MetricWoodruffKeyseatSpec,
+  WoodruffKeyseatSpec,
+} from "./keyseatRows.js";
 export { keyseatSideDepth } from "./keyseatSideDepth.js";
-export type { InchKeyClass, InchKeyseat, InchKeyseatMember, KeyseatMember } from "./keyseatValue.js";
-export type { InchKey, InchKeyKind, KeyLimits, KeySection, KeyShape } from "./keyValue.js";
+export type { InchKeyClass, InchKeyseat, InchKeyseatMember, KeyseatCorners, KeyseatMember } from "./keyseatValue.js";
+export type { GibHead, InchKey, InchKeyKind, KeyLimits, KeySection, KeySectionLike, KeyShape } from "./keyValue.js";
 export { keywayStrengthFactor } from "./keywayStrengthFactor.js";
 export type { KeyedShaft } from "./keywayStrengthFactor.js";
 export type { MeasuredSeat } from "./measuredDepth.js";
@@ -42,7 +53,7 @@ export { metricKey } from "./metricKey.js";
 export { metricKeyLength } from "./metricKeyLength.js";
 export type { MetricKeyLength, MetricKeyLengthOptions } from "./metricKeyLength.js";
 export { metricKeyseat } from "./metricKeyseat.js";
-export type { MetricKeyFit, MetricKeyseatOptions } from "./metricKeyseat.js";
+export type { KeywayClasses, MetricKeyFit, MetricKeyseatOptions } from "./metricKeyseat.js";
 export type { MetricKeyChoice } from "./metricKeySize.js";
 export type {
   MetricHubDepth,
@@ -81,4 +92,10 @@ export { woodruffKeysFor } from "./woodruffKeysFor.js";
 export type { SuggestedWoodruffKeys } from "./woodruffKeysFor.js";
 export { woodruffNumber } from "./woodruffNumber.js";
 export type { WoodruffSize } from "./woodruffNumber.js";
-export type { WoodruffKey, WoodruffKeyseat, WoodruffNumber } from "./woodruffValue.js";
+export type {
+  WoodruffHubSeat,
+  WoodruffKey,
+  WoodruffKeyseat,
+  WoodruffNumber,
+  WoodruffShaftSeat,
+} from "./woodruffValue.js";

@@ -1,4 +1,5 @@
-import type { Caution } from "../basis.js";
+import type { BasisStep, Caution } from "../basis.js";
+import { ownValue } from "../ownValue.js";
 
 /** What goes with every result about the strength of a keyed joint. */
 export const CARRIES_LOAD: Caution = Object.freeze({
@@ -22,3 +23,9 @@ export const DOUBTFUL: Caution = Object.freeze({
   code: "KEY_VALUE_DOUBTFUL",
   says: "A value here is remembered or printed in two ways, see the basis: check it against the standard before acceptance.",
 });
+
+/** True for a step that rests on memory or contradicts another print. */
+export function isDoubtful(step: BasisStep): boolean {
+  const mark = ownValue(step, "mark");
+  return mark === "memory" || mark === "conflict";
+}

@@ -1,23 +1,41 @@
 import { LimitsError } from "../errors.js";
-import type { Basis, BasisStep, Caution } from "../basis.js";
 import { ownValue } from "../ownValue.js";
-import { asLength, asStress, asTorque, force, lengthOfTicks, multiply, stress, torque } from "../units/index.js";
+import { asLength, asTorque, force, lengthOfTicks, multiply, stress, torque } from "../units/index.js";
 import type { Length, LengthLike, Stress, StressLike, Torque, TorqueLike } from "../units/index.js";
-import { CARRIES_LOAD } from "./keyCautions.js";
+import { allowedStresses } from "./keyAllowables.js";
+import type { Allowed } from "./keyAllowables.js";
+import { figures } from "./figures.js";
+import { loadBasis, loadCautions } from "./keyLoadBasis.js";
 import type { BearingAllowables, KeyEnds, KeyLoad, PressureForm, SeveralKeysRule, ShearRule } from "./keyLoadValue.js";
-import { keyStep } from "./keyStep.js";
-import { keywayStrengthFactor } from "./keywayStrengthFactor.js";
+import { strengthFactor } from "./keywayStrengthFactor.js";
+import type { KeySectionLike } from "./keyValue.js";
 import { oneOf } from "./oneOf.js";
 import { positiveLength } from "./positiveLength.js";
-import { figures } from "./torqueFromPower.js";
+
+/** Allowable stresses of the caller's own. */
+export interface KeyAllowables {
+  /** Shear stress of the key. */
+  readonly shear?: StressLike;
+  /** Pressure on the flanks, for all parts or for key, shaft and hub apart. */
+  readonly bearing?: StressLike | BearingAllowables<StressLike>;
+}
+
+/** Yield strengths in place of allowables. */
+export interface KeyMaterials {
+  /** Yield strengths of key, shaft and hub. */
+  readonly yield: BearingAllowables<StressLike>;
+  /** How much of the key's strength counts in shear. */
+  readonly shearRule: ShearRule;
+}
 
 /** A keyed joint and its load. */
 export interface KeyLoadParts {
   /** Torque that the joint carries; without it there is a capacity only. */
   readonly torque?: TorqueLike;
+  /** Diameter of the shaft. */
   readonly shaftDiameter: LengthLike;
   /** Nominal section of the key. */
-  readonly key: { readonly width: LengthLike; readonly height: LengthLike };
+  readonly key: KeySectionLike;
   /** Overall length of the key; without it there is a needed length only. */
   readonly length?: LengthLike;
   /** There is no default: standards differ in what a bare designation means. */
@@ -29,12 +47,9 @@ export interface KeyLoadParts {
   /** Depth of the hub keyway from the crown, t2, for the form that asks for it. */
   readonly hubDepth?: LengthLike;
   /** Allowable stresses of your own: `shear` of the key, `bearing` for all parts or for key, shaft and hub apart. */
-  readonly allowables?: {
-    readonly shear?: StressLike;
-    readonly bearing?: StressLike | BearingAllowables<StressLike>;
-  };
+  readonly allowables?: KeyAllowables;
   /** Yield strengths in place of allowables, and how much of the key's counts in shear. */
-  readonly materials?: { readonly yield: BearingAllowables<StressLike>; readonly shearRule: ShearRule };
+  readonly materials?: KeyMaterials;
   /** What the stresses are divided by: 1 unless said otherwise with `allowables`, to be said with `materials`. */
   readonly safetyFactor?: number;
   /** Number of keys, 1 unless said otherwise; two keys need `severalKeys`. */
@@ -103,8 +118,7 @@ export function keyLoad(parts: KeyLoadParts): KeyLoad {
   const countsAs = countOf(parts);
   const allowed = allowedStresses(parts);
   const geometry = { shaft, width, bearingLength, bearingHeight, countsAs };
-  const factor =
-    shaftDepth === null ? null : figures(keywayStrengthFactor({ shaftDiameter: shaft, width, depth: shaftDepth }));
+  const factor = shaftDepth === null ? null : strengthFactor(shaft, width, shaftDepth, "shaftDepth");
   return Object.freeze({
     force: load === null ? null : force(figures(forceOf(load, geometry, system)), system.force),
     bearingLength: bearingLength === null ? null : shownIn(bearingLength, system),
@@ -118,8 +132,8 @@ export function keyLoad(parts: KeyLoadParts): KeyLoad {
     neededLength: neededLength(load, geometry, system, allowed, lost),
     capacity: capacityOf(geometry, system, allowed),
     shaftStrengthFactor: factor,
-    basis: basisOf(form, ends, countsAs, allowed.step, factor),
-    cautions: cautionsOf(bearingLength, shaft),
+    basis: loadBasis(form, ends, countsAs, allowed.step, factor),
+    cautions: loadCautions(bearingLength, shaft),
   });
 }
 
@@ -147,12 +161,6 @@ interface Geometry {
   readonly bearingLength: Length | null;
   readonly bearingHeight: Length;
   readonly countsAs: number;
-}
-
-interface Allowed {
-  readonly shear: Stress | null;
-  readonly bearing: Stress | null;
-  readonly step: BasisStep | null;
 }
 
 function systemOf(load: Torque | null, shaft: Length): System {
@@ -228,89 +236,6 @@ function countOf(parts: KeyLoadParts): number {
   return 1.5;
 }
 
-function allowedStresses(parts: KeyLoadParts): Allowed {
-  const allowables = ownValue(parts, "allowables");
-  const materials = ownValue(parts, "materials");
-  const factor: unknown = ownValue(parts, "safetyFactor");
-  if (allowables !== undefined && materials !== undefined) {
-    throw new LimitsError("KEY_LOAD_INVALID", "stresses come from allowables or from materials, not from both", {
-      allowed: "allowables, or materials",
-      path: ["materials"],
-    });
-  }
-  if (factor === undefined && materials !== undefined) throw badFactor(factor);
-  const divisor = factor ?? 1;
-  if (typeof divisor !== "number" || !Number.isFinite(divisor) || divisor < 1) throw badFactor(divisor);
-  if (materials !== undefined) {
-    const rule = oneOf(ownValue(materials, "shearRule"), ["0.5", "0.577"] as const, "a rule for shear", [
-      "materials",
-      "shearRule",
-    ]);
-    const strengths = ownValue(materials, "yield");
-    const ofPart = (name: "key" | "shaft" | "hub"): Stress =>
-      positiveStress(ownValue(strengths, name), ["materials", "yield", name]);
-    const key = ofPart("key");
-    return {
-      shear: scaled(key, Number(rule) / divisor),
-      bearing: scaled(weakest([key, ofPart("shaft"), ofPart("hub")]), 1 / divisor),
-      step: keyStep(
-        "the caller",
-        "materials",
-        `shear ${rule} of the key's yield strength, bearing the least yield strength, both over a safety factor of ${divisor}`,
-        "caller",
-      ),
-    };
-  }
-  if (allowables === undefined) return { shear: null, bearing: null, step: null };
-  const shear = ownValue(allowables, "shear");
-  const bearing = ownValue(allowables, "bearing");
-  return {
-    shear: shear === undefined ? null : scaled(positiveStress(shear, ["allowables", "shear"]), 1 / divisor),
-    bearing: bearing === undefined ? null : scaled(leastBearing(bearing), 1 / divisor),
-    step: keyStep("the caller", "allowables", `stresses as given, over a safety factor of ${divisor}`, "caller"),
-  };
-}
-
-function badFactor(value: unknown): LimitsError {
-  return new LimitsError(
-    "KEY_LOAD_INVALID",
-    "a safety factor is a number from 1 up; with yield strengths it must be said",
-    {
-      value,
-      allowed: "such as 3",
-      path: ["safetyFactor"],
-    },
-  );
-}
-
-function leastBearing(bearing: StressLike | BearingAllowables<StressLike>): Stress {
-  const path = ["allowables", "bearing"];
-  if (typeof bearing === "string" || ownValue(bearing as { readonly unit?: unknown }, "unit") !== undefined) {
-    return positiveStress(bearing as StressLike, path);
-  }
-  const parts = bearing as BearingAllowables<StressLike>;
-  return weakest(
-    (["key", "shaft", "hub"] as const).map((name) => positiveStress(ownValue(parts, name), [...path, name])),
-  );
-}
-
-function positiveStress(value: StressLike | undefined, path: readonly string[]): Stress {
-  if (value === undefined) {
-    throw new LimitsError("KEY_LOAD_INVALID", "a stress is missing", { allowed: 'such as "100 MPa"', path });
-  }
-  const given = asStress(value, path);
-  if (given.value > 0) return given;
-  throw new LimitsError("KEY_LOAD_INVALID", "a stress is over zero here", { value: given.toString(), path });
-}
-
-function weakest(stresses: readonly Stress[]): Stress {
-  return stresses.reduce((least, one) => (one.to("MPa") < least.to("MPa") ? one : least));
-}
-
-function scaled(given: Stress, factor: number): Stress {
-  return stress(figures(given.value * factor), given.unit);
-}
-
 /** Force at the surface of the shaft, F = 2T/D. */
 function forceOf(load: Torque, { shaft }: Geometry, system: System): number {
   return (2 * load.to(system.torque) * system.perTorque) / shaft.to(system.length);
@@ -364,80 +289,4 @@ function capacityOf(geometry: Geometry, system: System, allowed: Allowed): KeyLo
 
 function shownIn(length: Length, system: System): Length {
   return lengthOfTicks(length.ticks, system.length);
-}
-
-const FORM_SOURCES: Readonly<Record<PressureForm, Parameters<typeof keyStep>>> = {
-  "half height": [
-    "Machine Elements in Mechanical Design, 4th edition",
-    "p. 500",
-    "p = 4T / (D h l), on half the height of the key",
-    "common practice",
-    "two-sources",
-  ],
-  "h - t1": [
-    "DIN 6892 method C (simple form)",
-    "pressure on the hub flank",
-    "p = 2T / (D l (h - t1)); chamfers and radii neglected",
-    "common practice",
-    "memory",
-  ],
-  "0.45 h": ["Roloff/Matek Maschinenelemente", "bearing height", "p = 2T / (D l 0.45 h)", "common practice", "memory"],
-  "t1 or t2": [
-    "Dasar Perencanaan dan Pemilihan Elemen Mesin",
-    "pressure on the side of the keyway",
-    "p = F / (l t), t the smaller of t1 and t2",
-    "common practice",
-    "one-source",
-  ],
-};
-
-function basisOf(
-  form: PressureForm,
-  ends: KeyEnds,
-  countsAs: number,
-  allowed: BasisStep | null,
-  factor: number | null,
-): Basis {
-  const steps = [
-    keyStep(
-      "Machine Elements in Mechanical Design, 4th edition",
-      "p. 499",
-      "F = 2T/D, shear stress = 2T / (D b l)",
-      "common practice",
-      "two-sources",
-    ),
-    keyStep(...FORM_SOURCES[form]),
-  ];
-  if (ends !== "square") {
-    const says =
-      ends === "round" ? "l = length - b: round ends do not bear" : "l = length - b/2: a round end does not bear";
-    steps.push(keyStep("published machine-design texts", "bearing length", says, "common practice", "one-source"));
-  }
-  if (countsAs !== 1) {
-    const says = "two keys 180 degrees apart count as 1.5 keys";
-    steps.push(keyStep("published machine-design texts", "several keys", says, "common practice", "one-source"));
-  }
-  if (allowed !== null) steps.push(allowed);
-  if (factor !== null) {
-    steps.push(
-      keyStep(
-        "Machinery's Handbook, 31st edition",
-        "p. 301 (University of Illinois Bulletin 42)",
-        "e = 1 - 0.2 w/d - 1.1 h/d: static torsion of the shaft, no fatigue factor",
-        "common practice",
-        "memory",
-      ),
-    );
-  }
-  return Object.freeze(steps);
-}
-
-const LONG: Caution = Object.freeze({
-  code: "KEY_LENGTH_LONG",
-  says: "The key bears over more than 1.5 times the shaft diameter: textbooks (German ones from 1.3 on) do not count the rest.",
-});
-
-function cautionsOf(bearingLength: Length | null, shaft: Length): readonly Caution[] {
-  const isLong = bearingLength !== null && 2 * bearingLength.ticks > 3 * shaft.ticks;
-  return Object.freeze(isLong ? [CARRIES_LOAD, LONG] : [CARRIES_LOAD]);
 }

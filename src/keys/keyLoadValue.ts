@@ -25,8 +25,11 @@ export type ShearRule = "0.5" | "0.577";
 
 /** Stress allowed on the parts that meet at the flanks. */
 export interface BearingAllowables<S> {
+  /** Of the key. */
   readonly key: S;
+  /** Of the shaft. */
   readonly shaft: S;
+  /** Of the hub. */
   readonly hub: S;
 }
 
@@ -42,7 +45,9 @@ export interface NeededLength {
 
 /** Torque that can be carried, by what limits it. */
 export interface TorqueCapacity {
+  /** By shear of the key; `null` without an allowable or a length. */
   readonly shear: Torque | null;
+  /** By pressure on the flanks; `null` without an allowable or a length. */
   readonly bearing: Torque | null;
   /** The smaller of the two. */
   readonly governing: Torque | null;
@@ -56,6 +61,7 @@ export interface KeyLoad {
   readonly bearingLength: Length | null;
   /** Height on which the pressure is taken, by the form. */
   readonly bearingHeight: Length;
+  /** The form of the pressure formula, by name. */
   readonly pressureForm: PressureForm;
   /** How many keys the joint counts as: 1, or 1.5 for two. */
   readonly countsAs: number;
@@ -67,13 +73,17 @@ export interface KeyLoad {
   readonly allowedShear: Stress | null;
   /** Pressure that is allowed on the weakest part, the safety factor taken out; `null` where none is given. */
   readonly allowedPressure: Stress | null;
+  /** Length that is needed for the allowables. */
   readonly neededLength: NeededLength;
+  /** Torque that the allowables let through at the given length. */
   readonly capacity: TorqueCapacity;
   /**
    * Strength of the shaft with the keyway over that of the plain shaft, in static torsion; `null` where the depth of
    * the shaft keyway is not given.
    */
   readonly shaftStrengthFactor: number | null;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }

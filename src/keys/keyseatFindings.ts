@@ -7,17 +7,23 @@ import type { KeyseatRow, KeyseatRows } from "./keyseatRows.js";
 export interface PrintedKeyseat {
   /** S, T, d − t1 or d + t2. */
   readonly control?: LimitsLike;
+  /** Width of the seat. */
   readonly width?: LimitsLike;
 }
 
 /** A printed dimension that is not the standard's. */
 export interface KeyseatFinding {
+  /** Stable code; it never changes its meaning. */
   readonly code: "KEYSEAT_NOT_STANDARD";
+  /** Which dimension. */
   readonly name: KeyseatRow["name"];
+  /** How the standard writes it. */
   readonly symbol: KeyseatRow["symbol"];
+  /** What the drawing prints. */
   readonly printed: Limits;
   /** What the standard gives; `null` where it gives none. */
   readonly standard: Limits | null;
+  /** In words, with sizes. */
   readonly says: string;
 }
 

@@ -18,12 +18,37 @@ import { oneOf } from "./oneOf.js";
 import { positiveLength } from "./positiveLength.js";
 import { woodruffKeyseat } from "./woodruffKeyseat.js";
 
+/** Which member of the joint has the keyseat. */
+export interface KeyseatPlace {
+  /** `"shaft"` or `"hub"`. */
+  readonly member: KeyseatMember;
+}
+
+/** A keyseat of ANSI/ASME B17.1 on a drawing. */
+export interface InchKeyseatSpec extends InchKeyseatOptions, KeyseatPlace {
+  /** ANSI/ASME B17.1. */
+  readonly standard: "B17.1";
+}
+
+/** A Woodruff keyseat of ANSI/ASME B17.2 on a drawing. */
+export interface WoodruffKeyseatSpec extends KeyseatPlace {
+  /** ANSI/ASME B17.2. */
+  readonly standard: "B17.2";
+  /** Number of the key, such as `"404"`. */
+  readonly number: string;
+}
+
+/** A metric keyway on a drawing. */
+export interface MetricKeyseatSpec extends MetricKeyseatOptions, KeyseatPlace {
+  /** The standard; it must be said. */
+  readonly standard: MetricKeyStandard;
+}
+
+/** A metric Woodruff keyway on a drawing. */
+export interface MetricWoodruffKeyseatSpec extends MetricWoodruffKeyseatOptions, KeyseatPlace {}
+
 /** A keyseat as a drawing calls for it, by any of the standards. */
-export type KeyseatSpec =
-  | ({ readonly standard: "B17.1"; readonly member: KeyseatMember } & InchKeyseatOptions)
-  | { readonly standard: "B17.2"; readonly member: KeyseatMember; readonly number: string }
-  | ({ readonly standard: MetricKeyStandard; readonly member: KeyseatMember } & MetricKeyseatOptions)
-  | ({ readonly standard: "ISO 3912" | "DIN 6888"; readonly member: KeyseatMember } & MetricWoodruffKeyseatOptions);
+export type KeyseatSpec = InchKeyseatSpec | WoodruffKeyseatSpec | MetricKeyseatSpec | MetricWoodruffKeyseatSpec;
 
 /** One dimension of a keyseat on a drawing. */
 export interface KeyseatRow {
@@ -39,9 +64,13 @@ export interface KeyseatRow {
 export interface KeyseatRows {
   /** Standard with its edition. */
   readonly standard: string;
+  /** Shaft or hub. */
   readonly member: KeyseatMember;
+  /** The dimensions, control dimension first. */
   readonly rows: readonly KeyseatRow[];
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 

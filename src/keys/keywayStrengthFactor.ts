@@ -1,10 +1,12 @@
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
-import type { LengthLike } from "../units/index.js";
+import type { Length, LengthLike } from "../units/index.js";
+import { figures } from "./figures.js";
 import { positiveLength } from "./positiveLength.js";
 
 /** A shaft with a keyway. */
 export interface KeyedShaft {
+  /** Diameter d of the shaft. */
   readonly shaftDiameter: LengthLike;
   /** Width w of the keyway. */
   readonly width: LengthLike;
@@ -39,14 +41,19 @@ export function keywayStrengthFactor(shaft: KeyedShaft): number {
       path: ["width"],
     });
   }
+  return strengthFactor(diameter, width, depth, "depth");
+}
+
+/** The same of lengths that were read; `name` is that of the depth in the caller's data. */
+export function strengthFactor(diameter: Length, width: Length, depth: Length, name: string): number {
   // in tenths, so that the division is the only rounding
   const factor = (10 * diameter.ticks - 2 * width.ticks - 11 * depth.ticks) / (10 * diameter.ticks);
   if (factor <= 0) {
     throw new LimitsError("KEYSEAT_DEPTH_IMPOSSIBLE", "by the formula nothing of the shaft is left", {
       value: depth.toString(),
       allowed: "a keyway about as wide as a quarter of the shaft and half as deep",
-      path: ["depth"],
+      path: [name],
     });
   }
-  return factor;
+  return figures(factor);
 }

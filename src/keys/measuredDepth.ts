@@ -13,6 +13,7 @@ export interface MeasuredSeat {
   readonly diameter: LengthLike;
   /** Width of the seat. */
   readonly width: LengthLike;
+  /** Shaft or hub. */
   readonly member: KeyseatMember;
 }
 

@@ -5,7 +5,7 @@ import type { Limits } from "../limits/index.js";
 import { LimitsError } from "../errors.js";
 import { asLength, stress } from "../units/index.js";
 import type { Length, LengthLike, Ratio } from "../units/index.js";
-import { DOUBTFUL, NOT_STANDARD } from "./keyCautions.js";
+import { DOUBTFUL, NOT_STANDARD, isDoubtful } from "./keyCautions.js";
 import { keyStep } from "./keyStep.js";
 import type { KeyLimits } from "./keyValue.js";
 import { chooseMetricKey } from "./metricKeySize.js";
@@ -89,7 +89,7 @@ export function refuseWideKey(width: Length, shaft: Length): void {
 
 /** The cautions that go with a choice. */
 export function metricCautions(chosen: ChosenMetricKey, steps: readonly BasisStep[]): readonly Caution[] {
-  const doubtful = steps.some(({ mark }) => mark === "memory" || mark === "conflict");
+  const doubtful = steps.some(isDoubtful);
   return Object.freeze([...(chosen.standardForShaft ? [] : [NOT_STANDARD]), ...(doubtful ? [DOUBTFUL] : [])]);
 }
 

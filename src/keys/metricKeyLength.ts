@@ -5,8 +5,9 @@ import type { Limits } from "../limits/index.js";
 import { ownValue } from "../ownValue.js";
 import { multiply, um } from "../units/index.js";
 import type { Length, LengthLike } from "../units/index.js";
-import { DOUBTFUL } from "./keyCautions.js";
+import { DOUBTFUL, isDoubtful } from "./keyCautions.js";
 import { keyStep } from "./keyStep.js";
+import type { KeySectionLike } from "./keyValue.js";
 import { METRIC_FAMILIES } from "./metricFamily.js";
 import { classLimits, rangeOf } from "./metricKey.js";
 import { metricStandard, rowsOf, sectionRow } from "./metricKeySize.js";
@@ -20,14 +21,16 @@ export interface MetricKeyLengthOptions {
   /** `"ISO/R 773"` unless said otherwise. */
   readonly standard?: MetricKeyStandard;
   /** The section, for its range of lengths. */
-  readonly key?: { readonly width: LengthLike; readonly height: LengthLike };
+  readonly key?: KeySectionLike;
 }
 
 /** A key length judged by a standard: plain frozen data. */
 export interface MetricKeyLength {
   /** Standard with its edition. */
   readonly standard: string;
+  /** The length that was asked about. */
   readonly length: Length;
+  /** True where it is a length of the series. */
   readonly inSeries: boolean;
   /** Range of the section; `null` where none was given or its range is not known here. */
   readonly range: SizeRange | null;
@@ -43,7 +46,9 @@ export interface MetricKeyLength {
   readonly keyLimits: Limits | null;
   /** Limits of the length of a round-ended keyway; `null` likewise. */
   readonly keywayLimits: Limits | null;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 
@@ -111,7 +116,7 @@ export function metricKeyLength(length: LengthLike, options?: MetricKeyLengthOpt
     keyLimits: limits.key,
     keywayLimits: limits.keyway,
     basis: Object.freeze(steps),
-    cautions: Object.freeze(steps.some(({ mark }) => mark === "memory" || mark === "conflict") ? [DOUBTFUL] : []),
+    cautions: Object.freeze(steps.some(isDoubtful) ? [DOUBTFUL] : []),
   });
 }
 

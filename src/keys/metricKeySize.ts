@@ -1,8 +1,9 @@
 import { LimitsError } from "../errors.js";
 import type { BasisStep } from "../basis.js";
 import { ownValue } from "../ownValue.js";
-import type { Length, LengthLike } from "../units/index.js";
+import type { Length } from "../units/index.js";
 import { keyStep } from "./keyStep.js";
+import type { KeySectionLike } from "./keyValue.js";
 import { METRIC_FAMILIES, bracketedRows } from "./metricFamily.js";
 import type { MetricFamily, MetricRow } from "./metricFamily.js";
 import type { MetricKeyStandard } from "./metricValue.js";
@@ -15,7 +16,7 @@ export interface MetricKeyChoice {
   /** `"ISO/R 773"` unless said otherwise. */
   readonly standard?: MetricKeyStandard;
   /** A section b x h of the same standard in place of the one listed for the shaft; it is marked as off its row. */
-  readonly key?: { readonly width: LengthLike; readonly height: LengthLike };
+  readonly key?: KeySectionLike;
   /** True takes the bracketed sizes of JIS B 1301, which are not for new design; false unless said otherwise. */
   readonly bracketed?: boolean;
 }
@@ -91,11 +92,7 @@ export function rowsOf(standard: MetricKeyStandard, bracketed: boolean): readonl
 }
 
 /** The row of a section that the standard lists. */
-export function sectionRow(
-  own: { readonly width: LengthLike; readonly height: LengthLike },
-  rows: readonly MetricRow[],
-  family: MetricFamily,
-): MetricRow {
+export function sectionRow(own: KeySectionLike, rows: readonly MetricRow[], family: MetricFamily): MetricRow {
   const width = positiveLength(ownValue(own, "width"), "the width of the key", ["key", "width"]);
   const height = positiveLength(ownValue(own, "height"), "the height of the key", ["key", "height"]);
   const row = rows.find(

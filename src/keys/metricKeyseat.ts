@@ -20,12 +20,20 @@ import { tableMm } from "./tableLength.js";
 /** Fits of a parallel key by the words of ISO/R 773 and BS 4235-1. */
 export type MetricKeyFit = "free" | "normal" | "close";
 
+/** ISO classes of the keyway widths. */
+export interface KeywayClasses {
+  /** Class of the shaft keyway, such as `"P9"`. */
+  readonly shaft: string;
+  /** Class of the hub keyway, such as `"JS9"`. */
+  readonly hub: string;
+}
+
 /** Which metric keyways are meant. */
 export interface MetricKeyseatOptions extends MetricKeyChoice {
   /** `"free"` H9 shaft and D10 hub, `"normal"` N9 and JS9, `"close"` P9 and P9. There is no default: makers' differ. */
   readonly fit?: MetricKeyFit;
   /** The ISO classes of the widths taken apart, such as P9 and JS9, in place of `fit`. */
-  readonly widths?: { readonly shaft: string; readonly hub: string };
+  readonly widths?: KeywayClasses;
   /** Which hub depth, where the standard has two; `"back clearance"` for parallel keys unless said otherwise. */
   readonly hubDepth?: MetricHubDepth;
 }

@@ -26,7 +26,9 @@ export type MetricHubDepth = "back clearance" | "back interference";
 
 /** Two sizes, least and greatest. */
 export interface SizeRange {
+  /** Least. */
   readonly min: Length;
+  /** Greatest. */
   readonly max: Length;
 }
 
@@ -54,7 +56,9 @@ export interface MetricKey {
   readonly lengths: SizeRange | null;
   /** Least tensile strength of the finished key that the standard asks; `null` where it is not known here. */
   readonly leastStrength: Stress | null;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 
@@ -76,12 +80,15 @@ export interface MetricKeywayMember {
 export interface MetricKeyseat {
   /** Standard with its edition. */
   readonly standard: string;
+  /** Nominal diameter of the shaft where the key sits. */
   readonly shaftDiameter: Length;
   /** Nominal section of the key. */
   readonly key: KeySection;
   /** True where the standard lists this section for this shaft. */
   readonly standardForShaft: boolean;
+  /** The keyway in the shaft. */
   readonly shaft: MetricKeywayMember;
+  /** The keyway in the hub. */
   readonly hub: MetricKeywayMember;
   /** Radius of the keyway corners; `null` where it is not known here. */
   readonly radius: SizeRange | null;
@@ -89,6 +96,8 @@ export interface MetricKeyseat {
   readonly chamfer: SizeRange | null;
   /** Smallest bore of a part that must pass over the fitted key, in DIN 6885-1; `null` elsewhere. */
   readonly passOverBore: Length | null;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }

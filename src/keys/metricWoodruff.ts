@@ -23,6 +23,7 @@ export type WoodruffDuty = "torque" | "locating";
 export interface MetricWoodruffChoice {
   /** There is no default: the same size has other depths in the other standard. */
   readonly standard: MetricWoodruffStandard;
+  /** Width b of the key. */
   readonly width: LengthLike;
   /** Diameter of the circle that the key is cut from: D of ISO 3912, d2 of DIN 6888. */
   readonly diameter: LengthLike;

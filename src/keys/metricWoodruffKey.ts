@@ -17,7 +17,9 @@ export interface MetricWoodruffKey {
   readonly standard: string;
   /** Such as `"4x6.5x16"`: b x h x D. */
   readonly designation: string;
+  /** Width b, h9. */
   readonly width: Limits;
+  /** Height h, h11 in ISO 3912 and h12 in DIN 6888. */
   readonly height: Limits;
   /** Diameter of the circle; `null` where its deviation is not known here. */
   readonly diameter: Limits | null;
@@ -25,10 +27,11 @@ export interface MetricWoodruffKey {
   readonly flatBottomHeight: Length | null;
   /** Edge chamfer; `null` where it is not known here. */
   readonly chamfer: SizeRange | null;
-  /** Limits of the section, as {@link keyedAssembly} takes them. */
+  /** Limits of the section, as `keyedAssembly` takes them. */
   readonly limits: KeyLimits;
   /** Least tensile strength of the finished key that the standard asks; `null` where it is not known here. */
   readonly leastStrength: Stress | null;
+  /** Where it comes from. */
   readonly basis: Basis;
 }
 

@@ -11,6 +11,7 @@ import { tableMm } from "./tableLength.js";
 
 /** What a Woodruff key is to do, and by which standard. */
 export interface MetricWoodruffQuestion {
+  /** The standard; it must be said. */
   readonly standard: MetricWoodruffStandard;
   /** `"torque"` where the key carries the torque, `"locating"` where it only holds the position; no default. */
   readonly duty: WoodruffDuty;
@@ -20,6 +21,7 @@ export interface MetricWoodruffQuestion {
 export interface MetricWoodruffKeys {
   /** Sizes b x h x D, in the order of the table. */
   readonly designations: readonly string[];
+  /** Where it comes from. */
   readonly basis: readonly BasisStep[];
 }
 

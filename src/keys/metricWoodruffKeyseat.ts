@@ -5,7 +5,7 @@ import type { Limits } from "../limits/index.js";
 import { ownValue } from "../ownValue.js";
 import { um } from "../units/index.js";
 import type { Length } from "../units/index.js";
-import { DOUBTFUL } from "./keyCautions.js";
+import { DOUBTFUL, isDoubtful } from "./keyCautions.js";
 import { keyStep } from "./keyStep.js";
 import type { KeyseatMember } from "./keyseatValue.js";
 import { classLimits, rangeOf } from "./metricKey.js";
@@ -39,13 +39,17 @@ export interface MetricWoodruffKeyseat {
   readonly standard: string;
   /** Size of the key, b x h x D. */
   readonly designation: string;
+  /** The keyway in the shaft. */
   readonly shaft: MetricWoodruffMember;
+  /** The keyway in the hub. */
   readonly hub: MetricWoodruffMember;
   /** Radius of the keyway corners; `null` where it is not known here. */
   readonly radius: SizeRange | null;
   /** Diameter of the cutter, at most 0.5 mm over that of the key. */
   readonly cutterDiameter: Limits;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }
 
@@ -101,7 +105,7 @@ export function metricWoodruffKeyseat(options: MetricWoodruffKeyseatOptions): Me
     radius: rangeOf(row.radius),
     cutterDiameter: makeLimits(tableMm(row.diameter), um(500), um(0), Object.freeze([CUTTER_STEP]), null),
     basis: Object.freeze(steps),
-    cautions: Object.freeze(steps.some(({ mark }) => mark === "memory") ? [DOUBTFUL] : []),
+    cautions: Object.freeze(steps.some(isDoubtful) ? [DOUBTFUL] : []),
   });
 }
 

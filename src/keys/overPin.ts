@@ -12,6 +12,7 @@ import { positiveLength } from "./positiveLength.js";
 
 /** A pin that lies along a keyseat on its floor. */
 export interface PinInSeat {
+  /** Shaft or hub. */
   readonly member: KeyseatMember;
   /** S or d − t1 of the shaft, T or d + t2 of the hub, as limits. */
   readonly control: LimitsLike;

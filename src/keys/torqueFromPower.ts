@@ -2,9 +2,11 @@ import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
 import { asPower, torque } from "../units/index.js";
 import type { PowerLike, Torque } from "../units/index.js";
+import { figures } from "./figures.js";
 
 /** Power at a speed of rotation. */
 export interface PowerAtSpeed {
+  /** Power, over zero. */
   readonly power: PowerLike;
   /** Revolutions per minute. */
   readonly revolutionsPerMinute: number;
@@ -43,9 +45,4 @@ export function torqueFromPower(drive: PowerAtSpeed): Torque {
   const perRadian = 30 / (Math.PI * speed);
   if (power.unit === "hp") return torque(figures(power.to("hp") * 6600 * perRadian), "lbf-in");
   return torque(figures(power.to("W") * perRadian), "Nm");
-}
-
-/** A computed number to 12 figures: what a double holds beyond them is noise. */
-export function figures(value: number): number {
-  return Number(value.toPrecision(12));
 }

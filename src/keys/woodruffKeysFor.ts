@@ -11,6 +11,7 @@ import { WOODRUFF_SHAFT_RANGES } from "./tables/woodruffShaftRanges.js";
 export interface SuggestedWoodruffKeys {
   /** Numbers of ANSI/ASME B17.2, in the order of its table. */
   readonly numbers: readonly string[];
+  /** Where it comes from. */
   readonly basis: readonly BasisStep[];
 }
 

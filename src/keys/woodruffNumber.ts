@@ -8,7 +8,9 @@ import { WOODRUFF_KEYS } from "./tables/woodruffKeys.js";
 
 /** A Woodruff key by its size. */
 export interface WoodruffSize {
+  /** Width W of the key. */
   readonly width: LengthLike;
+  /** Diameter B of the key. */
   readonly diameter: LengthLike;
   /** True for the lower key of two that share width and diameter; false unless said otherwise. */
   readonly low?: boolean;

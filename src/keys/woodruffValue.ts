@@ -19,8 +19,11 @@ export interface WoodruffNumber {
 
 /** Woodruff key of ANSI/ASME B17.2: plain frozen data. */
 export interface WoodruffKey {
+  /** Standard with its edition. */
   readonly standard: string;
+  /** Number of the key. */
   readonly number: string;
+  /** Width W. */
   readonly width: Limits;
   /** Diameter B of the circle. */
   readonly diameter: Limits;
@@ -34,33 +37,48 @@ export interface WoodruffKey {
   readonly belowCentre: Length;
   /** Largest radius that may break the corners. */
   readonly cornerMax: Length;
-  /** Limits of the section with the full-radius height, as {@link keyedAssembly} takes them. */
+  /** Limits of the section with the full-radius height, as `keyedAssembly` takes them. */
   readonly limits: KeyLimits;
+  /** Where it comes from. */
   readonly basis: Basis;
+}
+
+/** A Woodruff keyseat in a shaft. */
+export interface WoodruffShaftSeat {
+  /** Width: the key is held in it. */
+  readonly width: Limits;
+  /** Depth at the side of the seat. */
+  readonly sideDepth: Limits;
+  /** Diameter of the seat, which the cutter makes: nominal to nominal with its allowance. */
+  readonly cutterDiameter: Limits;
+  /** S, from the deepest point of the seat to the opposite side of the shaft; `null` without a shaft diameter. */
+  readonly control: Limits | null;
+}
+
+/** A Woodruff keyseat in a hub. */
+export interface WoodruffHubSeat {
+  /** Width: the key has clearance in it. */
+  readonly width: Limits;
+  /** Depth at the side of the seat. */
+  readonly sideDepth: Limits;
+  /** T, from the bottom of the seat to the opposite side of the bore; `null` without a shaft diameter. */
+  readonly control: Limits | null;
 }
 
 /** Keyseats of ANSI/ASME B17.2 in shaft and hub: plain frozen data. */
 export interface WoodruffKeyseat {
+  /** Standard with its edition. */
   readonly standard: string;
+  /** Number of the key. */
   readonly number: string;
-  readonly shaft: {
-    readonly width: Limits;
-    /** Depth at the side of the seat. */
-    readonly sideDepth: Limits;
-    /** Diameter of the seat, which the cutter makes: nominal to nominal with its allowance. */
-    readonly cutterDiameter: Limits;
-    /** S, from the deepest point of the seat to the opposite side of the shaft; `null` without a shaft diameter. */
-    readonly control: Limits | null;
-  };
-  readonly hub: {
-    readonly width: Limits;
-    /** Depth at the side of the seat. */
-    readonly sideDepth: Limits;
-    /** T, from the bottom of the seat to the opposite side of the bore; `null` without a shaft diameter. */
-    readonly control: Limits | null;
-  };
+  /** The seat in the shaft. */
+  readonly shaft: WoodruffShaftSeat;
+  /** The seat in the hub. */
+  readonly hub: WoodruffHubSeat;
   /** How high the key stands over the side of the shaft keyseat. */
   readonly keyAboveShaft: Limits;
+  /** Where it comes from. */
   readonly basis: Basis;
+  /** What to weigh before relying on it. */
   readonly cautions: readonly Caution[];
 }

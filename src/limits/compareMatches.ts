@@ -4,7 +4,7 @@ import type { LimitsMatch, MatchedLimits } from "./limitsMatch.js";
 /**
  * Orders matches for a sort: exact ones first, then nearest, inside and outside rounding.
  *
- * @param left - a match of {@link matchLimits} (no unit)
+ * @param left - a match of `matchLimits` (no unit)
  * @param right - another one (no unit)
  * @returns a bare number (no unit), negative where `left` comes first, zero where they are equals
  * @throws nothing

@@ -2,7 +2,7 @@ import type { BasisStep } from "../basis.js";
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
 import { exactPlaces, lengthOfTicks, roundLength, subtract } from "../units/index.js";
-import type { DecimalMark, Length, LengthUnit, Rounding } from "../units/index.js";
+import type { DecimalMark, Length, Rounding } from "../units/index.js";
 import { asLimits } from "./asLimits.js";
 import { finenessOf } from "./finenessOf.js";
 import { limitsFromMaxMin } from "./limitsFromMaxMin.js";
@@ -15,9 +15,11 @@ export type ConversionMethod = "A" | "B";
 
 /** Options of {@link convertLimits}. */
 export interface ConvertOptions {
+  /** Method A (nearest) or B (inside). */
   readonly method: ConversionMethod;
   /** Decimals of the new unit; by the rule of fineness unless said otherwise. */
   readonly places?: number;
+  /** The decimal mark; `"."` unless said otherwise. */
   readonly decimalMark?: DecimalMark;
 }
 
@@ -25,6 +27,7 @@ export interface ConvertOptions {
 export interface ConvertedLimits {
   /** The converted, rounded limits. */
   readonly limits: Limits;
+  /** Method A (nearest) or B (inside). */
   readonly method: ConversionMethod;
   /** Decimals of the new unit that were kept. */
   readonly places: number;
@@ -42,7 +45,8 @@ export interface ConvertedLimits {
 
 /**
  * Converts limits between inch and metric by the published rules: limits, not deviations, exactly by 25.4, rounded
- * once to a fineness that follows from the original total tolerance.
+ * once to a fineness that follows from the original total tolerance. Limits that are in the system of `unit` already are
+ * not rounded; an inch size with an ISO class is of the metric system, for its limits do not end in inches.
  *
  * @param given - limits, any unit
  * @param unit - `"mm"` or `"in"`
@@ -50,7 +54,7 @@ export interface ConvertedLimits {
  *   inside (the original limits are never passed, as gauging needs); `places` to overrule the fineness
  * @returns the frozen converted limits in `unit`, the shift of each limit exact to the tick, and the dual text
  * @throws `ROUNDING_COLLAPSES` where method B leaves nothing between the limits, `CONVERSION_NO_FINENESS` where the
- *   rule has none for the tolerance, `OPTION_INVALID`, and what {@link asLimits} throws
+ *   rule has none for the tolerance, `LENGTH_NOT_EXACT`, `OPTION_INVALID`, and what {@link asLimits} throws
  * @example
  * ```ts
  * import { convertLimits, symmetricLimits } from "limitsmith";
@@ -104,7 +108,7 @@ export function convertLimits(given: LimitsLike, unit: "mm" | "in", options: Con
     minShift,
     lost: lengthOfTicks(minShift.ticks - maxShift.ticks, unit),
     oversteps: maxShift.ticks > 0 || minShift.ticks < 0,
-    dualText: `${lowHigh(original, original.nominal.unit, undefined, decimalMark)} [${lowHigh(converted, unit, places, decimalMark)}]`,
+    dualText: `${lowHigh(original, systemOf(original), undefined, decimalMark)} [${lowHigh(converted, unit, places, decimalMark)}]`,
   });
 }
 
@@ -115,21 +119,25 @@ function placesOf(
   asked: number | undefined,
 ): { readonly places: number; readonly step: BasisStep } {
   if (asked !== undefined) return { places: asked, step: callerPlaces(asked, unit) };
-  if (isMetric(original.nominal.unit) === (unit === "mm")) {
+  if (systemOf(original) === unit) {
     return { places: placesToWrite(original, unit), step: sameSystem(unit) };
   }
   return finenessOf(original.tolerance, unit);
 }
 
 /** One line of limits, the low one first as the one-line form has it. */
-function lowHigh(limits: Limits, unit: LengthUnit, places: number | undefined, decimalMark: DecimalMark): string {
+function lowHigh(limits: Limits, unit: "mm" | "in", places: number | undefined, decimalMark: DecimalMark): string {
   const shown = places ?? Math.max(...[limits.max, limits.min].map((size) => exactPlaces(size, unit) ?? 4));
   const { lines } = writeLimits(limits, { form: "limits", unit, places: shown, decimalMark });
-  return [...lines].reverse().join("/");
+  // whole numbers with a slash would read as a fraction
+  const mark = lines.every((line) => /^\d+$/.test(line)) ? "-" : "/";
+  return [...lines].reverse().join(mark);
 }
 
-function isMetric(unit: LengthUnit): boolean {
-  return unit === "mm" || unit === "um";
+/** The system that the limits were made in: an inch size with an ISO class has limits that end in mm only. */
+function systemOf({ nominal, max, min }: Limits): "mm" | "in" {
+  const metric = nominal.unit === "mm" || nominal.unit === "um";
+  return metric || exactPlaces(max, "in") === null || exactPlaces(min, "in") === null ? "mm" : "in";
 }
 
 function callerPlaces(places: number, unit: string): BasisStep {

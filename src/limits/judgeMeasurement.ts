@@ -20,6 +20,7 @@ export type Verdict = "pass" | "fail" | "not proven";
 
 /** Options of {@link judgeMeasurement}. */
 export interface JudgeOptions {
+  /** The rule, by its name. */
   readonly rule: DecisionRule;
   /** Expanded uncertainty U (k = 2), any unit; needed by the rules with a guard band. */
   readonly uncertainty?: LengthLike;
@@ -27,8 +28,11 @@ export interface JudgeOptions {
 
 /** A reading judged against limits. */
 export interface Judgement {
+  /** The verdict by the rule. */
   readonly verdict: Verdict;
+  /** The rule, by its name. */
   readonly rule: DecisionRule;
+  /** The reading as it was given. */
   readonly reading: Length;
   /** Guard band at each limit. */
   readonly guardBand: Length;
@@ -38,6 +42,7 @@ export interface Judgement {
   readonly rejection: { readonly max: Length; readonly min: Length };
   /** Room to the nearer limit: positive inside the limits, negative outside. */
   readonly margin: Length;
+  /** Where it comes from. */
   readonly basis: readonly BasisStep[];
 }
 

@@ -62,7 +62,10 @@ export function limits(parts: LimitsParts): Limits {
 function part(parts: LimitsParts, name: "nominal" | "upper" | "lower"): LengthLike {
   const value = ownValue(parts, name);
   if (value === undefined) {
-    throw new LimitsError("LIMITS_INVALID", `${name} is missing`, { allowed: "{ nominal, upper, lower }", path: [name] });
+    throw new LimitsError("LIMITS_INVALID", `${name} is missing`, {
+      allowed: "{ nominal, upper, lower }",
+      path: [name],
+    });
   }
   return value;
 }

@@ -1,13 +1,6 @@
 import { LimitsError } from "../errors.js";
 import { ownValue } from "../ownValue.js";
-import {
-  compareLengths,
-  lengthOfTicks,
-  multiply,
-  roundLength,
-  subtract,
-  writeLength,
-} from "../units/index.js";
+import { compareLengths, lengthOfTicks, multiply, roundLength, subtract, writeLength } from "../units/index.js";
 import type { DecimalMark, Length, LengthUnit, NumberStyle, Rounding } from "../units/index.js";
 import { asLimits } from "./asLimits.js";
 import type { Limits, LimitsLike } from "./limitsValue.js";
@@ -267,6 +260,9 @@ function sum(nominal: Length, deviation: Length): Length {
 function shiftText(shift: Length): string {
   if (shift.ticks === 0) return "unchanged";
   const inch = shift.unit === "mm" || shift.unit === "um" ? ("um" as const) : ("uin" as const);
-  const size = writeLength(lengthOfTicks(Math.abs(shift.ticks), inch), { places: inch === "um" ? 4 : 1, style: "metric" });
+  const size = writeLength(lengthOfTicks(Math.abs(shift.ticks), inch), {
+    places: inch === "um" ? 4 : 1,
+    style: "metric",
+  });
   return `${shift.ticks > 0 ? "raised" : "lowered"} by ${size}`;
 }

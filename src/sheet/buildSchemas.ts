@@ -108,7 +108,10 @@ function build(): Schemas {
     size,
     keyseat,
     frame: z.strictObject({ ...frameFields, features: z.array(z.unknown()) }),
-    sheet: z.strictObject({ ...frameFields, features: described(z.array(z.union([size, keyseat])), "Features of the drawing, in order") }),
+    sheet: z.strictObject({
+      ...frameFields,
+      features: described(z.array(z.union([size, keyseat])), "Features of the drawing, in order"),
+    }),
     descriptions,
   };
 }

@@ -1,6 +1,7 @@
 import { LimitsError, attempt } from "../errors.js";
 import { fitOf } from "../limits/index.js";
-import type { Limits } from "../limits/index.js";
+import type { Fit, Limits } from "../limits/index.js";
+import { equalLengths } from "../units/index.js";
 import type { ReadRow } from "./readRow.js";
 import type { SheetFit } from "./sheetValue.js";
 
@@ -8,6 +9,8 @@ interface Member {
   readonly id: string;
   readonly kind: "hole" | "shaft" | null;
   readonly limits: Limits | null;
+  /** The fit that the callout names, where it names one. */
+  readonly fit: Fit | null;
   /** True where the callout states a nominal size, false for two limits. */
   readonly hasNominal: boolean;
 }
@@ -16,7 +19,8 @@ interface Member {
 export function resolveMates(read: readonly ReadRow[]): readonly SheetFit[] {
   const members = new Map<string, Member>();
   // the first feature of an id is the one that counts
-  for (const one of read) if (one.spec !== null && !members.has(one.spec.id)) members.set(one.spec.id, memberOf(one, one.spec.id));
+  for (const one of read)
+    if (one.spec !== null && !members.has(one.spec.id)) members.set(one.spec.id, memberOf(one, one.spec.id));
   const done = new Set<string>();
   const fits: SheetFit[] = [];
   for (const { spec, row } of read) {
@@ -36,11 +40,17 @@ function memberOf({ row }: ReadRow, id: string): Member {
     id,
     kind: row.kind,
     limits: resolved?.limits ?? null,
+    fit: resolved?.fit ?? null,
     hasNominal: resolved?.request.kind !== "limits",
   };
 }
 
-function mateOf(members: ReadonlyMap<string, Member>, id: string, mate: string, path: readonly (string | number)[]): SheetFit {
+function mateOf(
+  members: ReadonlyMap<string, Member>,
+  id: string,
+  mate: string,
+  path: readonly (string | number)[],
+): SheetFit {
   const found = attempt(() => {
     const first = members.get(id);
     const second = members.get(mate);
@@ -70,11 +80,22 @@ function mateOf(members: ReadonlyMap<string, Member>, id: string, mate: string, 
       });
     }
     const nominals = hole.hasNominal && shaft.hasNominal ? "same" : "any";
-    return { hole: hole.id, shaft: shaft.id, fit: fitOf(hole.limits, shaft.limits, { nominals }) };
+    return {
+      hole: hole.id,
+      shaft: shaft.id,
+      fit: namedFit(hole, shaft) ?? fitOf(hole.limits, shaft.limits, { nominals }),
+    };
   });
   return Object.freeze(
     found.ok
       ? { ok: true as const, ...found.value }
       : { ok: false as const, features: Object.freeze([id, mate] as const), error: found.error },
   );
+}
+
+/** The fit that both callouts name, with all that it says, where they name the same one on the same size. */
+function namedFit(hole: Member, shaft: Member): Fit | null {
+  if (hole.fit === null || shaft.fit === null) return null;
+  const same = hole.fit.designation === shaft.fit.designation && equalLengths(hole.fit.nominal, shaft.fit.nominal);
+  return same ? hole.fit : null;
 }

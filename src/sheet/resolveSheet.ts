@@ -23,7 +23,7 @@ import type { FinishContext } from "./surfaceOf.js";
  *
  * A bad row costs that row only: every other row is resolved, and the counts add up.
  *
- * @param json - the drawing as `JSON.parse` gives it, see {@link SheetSpec}: `drawing`, `unit` (mm or in),
+ * @param json - the drawing as `JSON.parse` gives it, see `SheetSpec`: `drawing`, `unit` (mm or in),
  *   `titleBlock`, `features`
  * @returns the frozen sheet: one row a feature in order (limits with units, or the error with its path), fits of
  *   the mates, unknown keys, counts
@@ -132,7 +132,10 @@ function rowOf(
   if ("keyseat" in spec) return Object.freeze({ ...base, ok: false as const, error: WAITING });
   const resolved = attempt(() =>
     atPath(["features", index, "callout"], () =>
-      resolveCallout(spec.callout, spec.kind === undefined ? sheet.callouts : { ...sheet.callouts, feature: spec.kind }),
+      resolveCallout(
+        spec.callout,
+        spec.kind === undefined ? sheet.callouts : { ...sheet.callouts, feature: spec.kind },
+      ),
     ),
   );
   // the finish all over is for sizes; an angle or a reference dimension has no surface of its own
@@ -194,7 +197,11 @@ function kindOf({ request }: ResolvedCallout): "hole" | "shaft" | null {
   }
 }
 
-function faultyRow(feature: unknown, index: number, fault: { readonly path: DataPath; readonly says: string }): ReadRow {
+function faultyRow(
+  feature: unknown,
+  index: number,
+  fault: { readonly path: DataPath; readonly says: string },
+): ReadRow {
   const text = (key: string): string | null => {
     const value = valueAt(feature, [key]);
     return typeof value === "string" ? value : null;

@@ -5,7 +5,7 @@ import type { SheetSpec } from "./sheetSpec.js";
 /**
  * The zod schema of a drawing file.
  *
- * It is strict, for forms and editors; {@link resolveSheet} is milder: it reports an unknown key and reads on.
+ * It is strict, for forms and editors; `resolveSheet` is milder: it reports an unknown key and reads on.
  *
  * @returns a `zod/mini` schema of {@link SheetSpec} (no unit of its own), built on first use
  * @throws nothing; its `parse` throws zod's own error

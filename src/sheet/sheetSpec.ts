@@ -2,6 +2,7 @@
 export interface FeatureBase {
   /** Name within the drawing, such as a balloon number; each one once. */
   readonly id: string;
+  /** What the feature is, in words. */
   readonly name?: string;
   /** Anything to remember; not read. */
   readonly note?: string;
@@ -25,6 +26,7 @@ export interface SizeFeatureSpec extends FeatureBase {
 
 /** A keyseat of a drawing, as a drawing file holds it. */
 export interface KeyseatFeatureSpec extends FeatureBase {
+  /** What the drawing says of the keyseat. */
   readonly keyseat: KeyseatFields;
 }
 
@@ -38,7 +40,9 @@ export interface KeyseatFields {
   readonly member?: "shaft" | "hub";
   /** Class of fit of B17.1. */
   readonly class?: number;
+  /** Shape of the key: square or rectangular. */
   readonly shape?: string;
+  /** Kind of key: parallel, taper or gib-head. */
   readonly kind?: string;
   /** A key of one's own, its sizes with units. */
   readonly key?: { readonly width: string; readonly height: string };
@@ -99,6 +103,8 @@ export interface SheetSpec {
   readonly decimalMark?: "." | ",";
   /** Anything to remember; not read. */
   readonly note?: string;
+  /** Default tolerances of the drawing. */
   readonly titleBlock?: TitleBlockFields;
+  /** The features, in the order of the drawing. */
   readonly features: readonly FeatureSpec[];
 }

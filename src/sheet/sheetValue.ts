@@ -7,6 +7,7 @@ import type { LengthUnit } from "../units/index.js";
 
 /** A keyseat worked out: its control dimension and width by the standard, and what the drawing prints. */
 export interface ResolvedKeyseat {
+  /** Tells the outcomes apart. */
   readonly outcome: "keyseat";
   /** Id of the shaft or bore that it is cut into. */
   readonly on: string;
@@ -32,9 +33,13 @@ export interface SheetSurface {
 export interface SheetRowBase {
   /** Place in the drawing file, from 0. */
   readonly index: number;
+  /** Id of the feature. */
   readonly id: string | null;
+  /** Name of the feature. */
   readonly name: string | null;
+  /** What stands on the drawing. */
   readonly callout: string | null;
+  /** Internal or external size. */
   readonly kind: "hole" | "shaft" | null;
 }
 
@@ -61,6 +66,7 @@ export interface SheetFinding {
   readonly severity: "error" | "warning" | "note";
   /** Ids of the features that it rests on. */
   readonly features: readonly string[];
+  /** The finding in words and figures. */
   readonly says: string;
   /** What the drawing has, where two values disagree. */
   readonly found: string | null;
@@ -72,6 +78,7 @@ export interface SheetFinding {
 
 /** How many of what; `features` is the sum of the next eight. */
 export interface SheetCounts {
+  /** How many features the file has. */
   readonly features: number;
   /** Rows with limits. */
   readonly limits: number;
@@ -97,10 +104,13 @@ export interface SheetCounts {
 
 /** A whole drawing, resolved: plain frozen data. */
 export interface ResolvedSheet {
+  /** Title of the drawing. */
   readonly drawing: string;
+  /** The unit of numbers without one. */
   readonly unit: LengthUnit;
   /** One row a feature, in the order of the drawing file. */
   readonly rows: readonly SheetRow[];
+  /** The fits of the mates. */
   readonly fits: readonly SheetFit[];
   /** What a checker would mark, in the order of the rows. */
   readonly findings: readonly SheetFinding[];
@@ -108,5 +118,6 @@ export interface ResolvedSheet {
   readonly problems: readonly LimitsProblem[];
   /** Keys of the file that mean nothing here, as paths; they were passed over. */
   readonly unknownKeys: readonly (readonly (string | number)[])[];
+  /** How many of what. */
   readonly counts: SheetCounts;
 }

@@ -16,7 +16,10 @@ export interface FinishContext {
 }
 
 /** Reads a finish in the unit of the drawing: a bare `Ra 32` is in µin on an inch drawing, in µm on a metric one. */
-export function readFinish(text: string, { unit, decimalMark }: Pick<FinishContext, "unit" | "decimalMark">): Roughness {
+export function readFinish(
+  text: string,
+  { unit, decimalMark }: Pick<FinishContext, "unit" | "decimalMark">,
+): Roughness {
   return roughness(text, { unit: unit === "in" ? "uin" : "um", decimalMark });
 }
 

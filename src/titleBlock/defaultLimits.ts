@@ -28,14 +28,14 @@ import type { TitleBlock, TitleBlockSpec } from "./titleBlockValue.js";
  *
  * @param block - the title block, or what {@link titleBlock} takes
  * @param size - the text as written (a decimal, an inch fraction, or an angle in degrees; ⌀ or R before it allowed),
- *   what {@link readDimension} or {@link readAngle} made of it, or a request of a callout
+ *   what `readDimension` or `readAngle` made of it, or a request of a callout
  * @param options - what the text cannot say: `feature`, `shorterLeg` of an angle (any unit), `process`, see
  *   {@link DefaultLimitsOptions}
  * @returns frozen limits in the unit of the size (or of the angle, in degrees), with the line that applied and cautions
  * @throws `TITLE_BLOCK_NO_LINE` where the block has no line for it, `TITLE_BLOCK_NOT_APPLICABLE` for reference, basic
  *   and stock dimensions, single limits, threads, sizes with a tolerance of their own, and sizes in another unit than
  *   the lines, `TITLE_BLOCK_OPTION_NEEDED` where the text is not enough, `GENERAL_TOLERANCE_OUT_OF_RANGE` and
- *   `GENERAL_TOLERANCE_NOT_DEFINED` where the standard has no value, `OPTION_INVALID`, and what {@link readDimension}
+ *   `GENERAL_TOLERANCE_NOT_DEFINED` where the standard has no value, `OPTION_INVALID`, and what `readDimension`
  *   and {@link titleBlock} throw
  * @example
  * ```ts

@@ -15,7 +15,7 @@ import type { GeneralToleranceLike } from "./generalToleranceValue.js";
  * @param standard - the indication, see {@link generalTolerance}: ISO 2768 with f, m, c, v or ISO 13920
  * @returns frozen limits of the angle, in degrees, the standard that applied, and cautions
  * @throws `GENERAL_TOLERANCE_OUT_OF_RANGE`, `GENERAL_TOLERANCE_NOT_CALLED` where the indication has no class for
- *   angles, `LENGTH_INVALID`, and what {@link generalTolerance} and {@link readAngle} throw
+ *   angles, `LENGTH_INVALID`, and what {@link generalTolerance} and `readAngle` throw
  * @example
  * ```ts
  * import { generalAngleLimits, mm } from "limitsmith";

@@ -1,3 +1,4 @@
+import { ownValue } from "../ownValue.js";
 import type { Basis, Caution } from "../basis.js";
 
 /** A value here was not read in any print of the standard. */
@@ -48,7 +49,9 @@ export const COMMON_PRACTICE: Caution = Object.freeze({
 
 /** The cautions, with one more where a step of the basis is from memory. */
 export function cautionsFor(basis: Basis, cautions: readonly Caution[]): readonly Caution[] {
-  return Object.freeze(basis.some(({ mark }) => mark === "memory") ? [...cautions, FROM_MEMORY] : [...cautions]);
+  return Object.freeze(
+    basis.some((step) => ownValue(step, "mark") === "memory") ? [...cautions, FROM_MEMORY] : [...cautions],
+  );
 }
 
 /** The cautions of a line: none for the drawing's own, for one of a preset that it is common practice. */

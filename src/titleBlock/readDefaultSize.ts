@@ -6,7 +6,7 @@ import type { AngleData, AngleLike, WrittenDimensionLike } from "../units/index.
 import type { OtherRequestLike, PlainAngleLike, PlainSizeLike } from "./defaultValue.js";
 import type { TitleBlock } from "./titleBlockValue.js";
 
-/** What {@link defaultLimits} takes for a size. */
+/** What `defaultLimits` takes for a size. */
 export type DefaultSizeLike =
   string | WrittenDimensionLike | AngleData | PlainSizeLike | PlainAngleLike | OtherRequestLike;
 

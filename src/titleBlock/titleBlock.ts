@@ -27,8 +27,8 @@ import type {
  *   `fractions`, `angles` (degrees), the same lines for `diameters` and `lengths`, standards (`general`, `castings`,
  *   `weldments`), and the notes `finish`, `edges` and `projection`
  * @returns the frozen block, its tolerances as lengths; taken by this function again unchanged
- * @throws `TITLE_BLOCK_INVALID`, and what {@link readDimension}, {@link readAngle}, {@link generalTolerance} and
- *   {@link readEdge} throw, with the path
+ * @throws `TITLE_BLOCK_INVALID`, and what `readDimension`, {@link readAngle}, {@link generalTolerance} and
+ *   `readEdge` throw, with the path
  * @example
  * ```ts
  * import { titleBlock } from "limitsmith";

@@ -7,7 +7,7 @@ import type {
   WeldmentIndication,
 } from "./generalToleranceValue.js";
 
-/** Names of the blocks of common practice, see {@link titleBlockPreset}. */
+/** Names of the blocks of common practice, see `titleBlockPreset`. */
 export type TitleBlockPresetName = "common inch" | "inch by diameter and length";
 
 /** Angle of projection of the views. */
@@ -52,7 +52,7 @@ export interface TitleBlockSpec extends TitleBlockLinesSpec {
   readonly preset?: TitleBlockPresetName | null;
 }
 
-/** Edges of a block as a caller or a drawing file gives them, see {@link readEdge}. */
+/** Edges of a block as a caller or a drawing file gives them, see `readEdge`. */
 export interface EdgeNoteSpec {
   /** External edges, such as `"-0.3"`. */
   readonly external?: string | { readonly text: string } | null;

@@ -8,7 +8,7 @@ import type { Length, LengthLike } from "./length.js";
  * @param left - any length, in any unit
  * @param right - any length, in any unit
  * @returns the sum, in the unit of `left`
- * @throws `LENGTH_OUT_OF_RANGE`, `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `LENGTH_OUT_OF_RANGE`, `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { add, inch, um } from "limitsmith";

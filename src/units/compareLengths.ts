@@ -8,7 +8,7 @@ import type { LengthLike } from "./length.js";
  * @param right - any length, in any unit
  * @returns −1 where `left` is shorter, 1 where it is longer, 0 where both are equal: an order for `sort`
  *   (a plain number without a unit)
- * @throws `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { compareLengths, inch, mm } from "limitsmith";

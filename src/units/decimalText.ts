@@ -6,12 +6,10 @@ export interface DecimalLike {
   toFixed(): string;
 }
 
-const toTag = Object.prototype.toString;
-
 /** A decimal object as text; a boxed number has a `toFixed` too, but one that drops its decimals. */
 export function decimalText(value: unknown, name = "length"): string {
   const text: unknown =
-    typeof value === "object" && value !== null && toTag.call(value) !== "[object Number]" && isDecimalLike(value)
+    typeof value === "object" && value !== null && !(value instanceof Number) && isDecimalLike(value)
       ? value.toFixed()
       : undefined;
   if (typeof text === "string") return text;

@@ -17,8 +17,7 @@ export function divideRounded(numerator: bigint, denominator: bigint, rounding: 
     case "nearest-away": {
       const twice = 2n * (remainder < 0n ? -remainder : remainder);
       const away =
-        twice > denominator ||
-        (twice === denominator && (rounding === "nearest-away" || quotient % 2n !== 0n));
+        twice > denominator || (twice === denominator && (rounding === "nearest-away" || quotient % 2n !== 0n));
       return away ? quotient + (negative ? -1n : 1n) : quotient;
     }
     default:

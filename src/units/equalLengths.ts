@@ -7,7 +7,7 @@ import type { LengthLike } from "./length.js";
  * @param left - any length, in any unit
  * @param right - any length, in any unit
  * @returns true where both are equal
- * @throws `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { equalLengths, inch, mm } from "limitsmith";

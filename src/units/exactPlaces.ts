@@ -11,7 +11,7 @@ const MOST_EXACT_PLACES = 7;
  * @param length - any length, in any unit
  * @param unit - the unit to write in: `mm`, `um`, `in`, `thou`, `uin`
  * @returns a whole number from 0 to 7, or `null` where the decimals do not end in that unit
- * @throws `UNIT_UNKNOWN`, `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `UNIT_UNKNOWN`, `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { exactPlaces, inch, mm } from "limitsmith";

@@ -46,10 +46,5 @@ export function multiply(length: LengthLike, factor: number | Ratio): Length {
 }
 
 function isRatio(value: unknown): value is Ratio {
-  return (
-    typeof value === "object" &&
-    value !== null &&
-    hasOwn(value, "numerator") &&
-    hasOwn(value, "denominator")
-  );
+  return typeof value === "object" && value !== null && hasOwn(value, "numerator") && hasOwn(value, "denominator");
 }

@@ -6,7 +6,8 @@ import { decimalMarkOf } from "./lengthFrom.js";
 import type { ReadOptions } from "./lengthFrom.js";
 
 const LONGEST_ANGLE_TEXT = 60;
-const ANGLE = /^([+\-\u2212]?)(?=\.?\d)(\d{0,7})(?:\.(\d{0,12}))?\s?(?:°|deg)(?:\s?(\d{1,2})\s?['′])?(?:\s?(\d{1,2})(?:\.(\d{0,6}))?\s?["″])?$/i;
+const ANGLE =
+  /^([+\-\u2212]?)(?=\.?\d)(\d{0,7})(?:\.(\d{0,12}))?\s?(?:°|deg)(?:\s?(\d{1,2})\s?['′])?(?:\s?(\d{1,2})(?:\.(\d{0,6}))?\s?["″])?$/i;
 
 /**
  * Reads an angle from a text with its sign of degree.
@@ -53,7 +54,10 @@ export function readAngle(text: AngleLike, options?: ReadOptions): Angle {
     Number(scaledDegrees / scale) +
     Number(minutes ?? 0) * 60_000_000 +
     Number((seconds ?? "0") + fraction.padEnd(6, "0"));
-  return angleOfMicroarcseconds(sign === "-" || sign === "\u2212" ? -magnitude : magnitude, divided ? "dms" : "decimal");
+  return angleOfMicroarcseconds(
+    sign === "-" || sign === "\u2212" ? -magnitude : magnitude,
+    divided ? "dms" : "decimal",
+  );
 }
 
 function angleOfData(given: object): Angle {

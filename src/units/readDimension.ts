@@ -38,7 +38,7 @@ export interface ReadDimensionOptions extends ReadOptions {
  * @param text - a decimal, or an inch fraction or mixed number, with or without a unit; up to 100 characters
  * @param options - `unit` of the drawing (mm, in …) for a bare number, `decimalMark`
  * @returns the exact length with its unit, and the form in which it was written
- * @throws `UNIT_MISSING` where neither the text nor the options have a unit, and what {@link readLength} throws
+ * @throws `UNIT_MISSING` where neither the text nor the options have a unit, and what `readLength` throws
  * @example
  * ```ts
  * import { readDimension } from "limitsmith";

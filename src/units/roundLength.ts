@@ -62,6 +62,7 @@ function mostPlaces(unit: LengthUnit): number {
 function tooFine(places: number): LimitsError {
   return new LimitsError("OPTION_INVALID", "a length cannot be rounded to that many decimals of that unit", {
     value: places,
-    allowed: "0 to 7 decimals of mm, 4 of µm, 6 of inches, 3 of thou, 0 of µin; in inch units one more where it ends there",
+    allowed:
+      "0 to 7 decimals of mm, 4 of µm, 6 of inches, 3 of thou, 0 of µin; in inch units one more where it ends there",
   });
 }

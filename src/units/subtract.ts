@@ -8,7 +8,7 @@ import type { Length, LengthLike } from "./length.js";
  * @param left - any length, in any unit
  * @param right - what is taken away, in any unit
  * @returns the difference, in the unit of `left`; negative where `right` is larger
- * @throws `LENGTH_OUT_OF_RANGE`, `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `LENGTH_OUT_OF_RANGE`, `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { mm, subtract, um } from "limitsmith";

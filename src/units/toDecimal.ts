@@ -15,7 +15,7 @@ let PrivateDecimal: typeof Decimal | undefined;
  * @param length - any length, in any unit
  * @param unit - the unit of the result: `mm`, `um`, `in`, `thou`, `uin`
  * @returns the value in `unit`: exact in mm and µm; in inch units exact where it ends, else to 40 figures
- * @throws `UNIT_UNKNOWN`, `LENGTH_INVALID`, and what {@link readLength} throws for a text
+ * @throws `UNIT_UNKNOWN`, `LENGTH_INVALID`, and what `readLength` throws for a text
  * @example
  * ```ts
  * import { inch, mm, toDecimal } from "limitsmith";
@@ -27,6 +27,8 @@ let PrivateDecimal: typeof Decimal | undefined;
  */
 export function toDecimal(length: LengthLike, unit: LengthUnit): Decimal {
   // without a prototype: Decimal would read the other settings from a polluted one
-  PrivateDecimal ??= Decimal.clone(Object.assign(Object.create(null), { precision: PRECISION, defaults: true }) as Decimal.Config);
+  PrivateDecimal ??= Decimal.clone(
+    Object.assign(Object.create(null), { precision: PRECISION, defaults: true }) as Decimal.Config,
+  );
   return new PrivateDecimal(asLength(length).ticks).div(ticksPerUnit(unit));
 }

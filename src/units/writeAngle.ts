@@ -13,7 +13,7 @@ export interface WriteAngleOptions {
 /**
  * Writes an angle as drawings do, exactly.
  *
- * @param angle - an angle in degrees: an {@link Angle}, its data or its text
+ * @param angle - an angle in degrees: an `Angle`, its data or its text
  * @param options - `style`: `"decimal"` or `"dms"`; as it was written unless said otherwise
  * @returns the text in degrees; a decimal that would not end is written in degrees, minutes and seconds
  * @throws `OPTION_INVALID`, and what {@link readAngle} throws

@@ -73,8 +73,7 @@ function publicFunctions() {
     const module = file === undefined ? undefined : checker.getSymbolAtLocation(file);
     if (module === undefined) continue;
     for (const exported of checker.getExportsOfModule(module)) {
-      const symbol =
-        (exported.flags & ts.SymbolFlags.Alias) === 0 ? exported : checker.getAliasedSymbol(exported);
+      const symbol = (exported.flags & ts.SymbolFlags.Alias) === 0 ? exported : checker.getAliasedSymbol(exported);
       const declaration = symbol.declarations?.find(ts.isFunctionDeclaration);
       if (declaration !== undefined) found.set(symbol.name, { name: symbol.name, symbol, declaration });
     }

@@ -13,7 +13,11 @@ const inComments = commentBlocks();
 const inDocuments = documentBlocks();
 const examples = [...inComments, ...inDocuments]
   .filter(({ language }) => language === "ts")
-  .map((block, index) => ({ ...block, name: `${block.file}:${block.line}`, path: join(GENERATED, `example${index}.ts`) }));
+  .map((block, index) => ({
+    ...block,
+    name: `${block.file}:${block.line}`,
+    path: join(GENERATED, `example${index}.ts`),
+  }));
 
 rmSync(GENERATED, { recursive: true, force: true });
 mkdirSync(GENERATED, { recursive: true });

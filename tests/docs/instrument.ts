@@ -38,7 +38,11 @@ ${out.join("\n")}
 /** Takes back the lines of a statement that is still open: an import or declaration that ended is left. */
 function takeOpenLines(out: string[]): string[] {
   const open: string[] = [];
-  for (let line = out.at(-1); line !== undefined && line.trim() !== "" && !/[;{]$|\*\/$|^\/\//.test(line.trim()); line = out.at(-1)) {
+  for (
+    let line = out.at(-1);
+    line !== undefined && line.trim() !== "" && !/[;{]$|\*\/$|^\/\//.test(line.trim());
+    line = out.at(-1)
+  ) {
     open.unshift(line);
     out.pop();
   }

@@ -4,20 +4,26 @@ import { attempt, readCallout, writeCallout } from "limitsmith";
 import type { CalloutRequest, CalloutStyle } from "limitsmith";
 
 // texts of every form, built from the forms and not from the reader
-const inchNumber = fc.tuple(fc.integer({ min: 0, max: 20 }), fc.integer({ min: 1, max: 9999 })).map(([whole, decimals]) => {
-  const text = String(decimals).padStart(4, "0");
-  return whole === 0 ? `.${text}` : `${whole}.${text}`;
-});
+const inchNumber = fc
+  .tuple(fc.integer({ min: 0, max: 20 }), fc.integer({ min: 1, max: 9999 }))
+  .map(([whole, decimals]) => {
+    const text = String(decimals).padStart(4, "0");
+    return whole === 0 ? `.${text}` : `${whole}.${text}`;
+  });
 const metricNumber = fc.oneof(
   fc.integer({ min: 4, max: 400 }).map(String),
-  fc.tuple(fc.integer({ min: 0, max: 400 }), fc.integer({ min: 1, max: 999 })).map(([whole, decimals]) => `${whole}.${String(decimals).padStart(3, "0")}`),
+  fc
+    .tuple(fc.integer({ min: 0, max: 400 }), fc.integer({ min: 1, max: 999 }))
+    .map(([whole, decimals]) => `${whole}.${String(decimals).padStart(3, "0")}`),
 );
 const fraction = fc
   .tuple(fc.integer({ min: 0, max: 30 }), fc.constantFrom(2, 4, 8, 16, 32, 64), fc.nat())
-  .map(([whole, denominator, seed]) => `${whole === 0 ? "" : `${whole} `}${1 + (seed % (denominator - 1))}/${denominator}`);
-const size = fc.record({ unit: fc.constantFrom("mm" as const, "in" as const) }).chain(({ unit }) =>
-  (unit === "mm" ? metricNumber : fc.oneof(inchNumber, fraction)).map((text) => ({ unit, text })),
-);
+  .map(
+    ([whole, denominator, seed]) => `${whole === 0 ? "" : `${whole} `}${1 + (seed % (denominator - 1))}/${denominator}`,
+  );
+const size = fc
+  .record({ unit: fc.constantFrom("mm" as const, "in" as const) })
+  .chain(({ unit }) => (unit === "mm" ? metricNumber : fc.oneof(inchNumber, fraction)).map((text) => ({ unit, text })));
 const small = fc.integer({ min: 1, max: 99 });
 const tolerance = fc.oneof(
   small.map((value) => `±.${String(value).padStart(3, "0")}`),
@@ -40,7 +46,9 @@ const others = fc.oneof(
   size.map(({ unit, text }) => ({ unit, text: `30° X ${text}` })),
   fc.tuple(inchNumber, inchNumber).map(([left, right]) => ({ unit: "in" as const, text: `⌀${left}/${right}` })),
   fc.tuple(small, small).map(([angle, by]) => ({ unit: "mm" as const, text: `${angle}° ±${by}°` })),
-  fc.constantFrom("M8x1.25-6g", "1/2-13 UNC-2A THRU", "#10-32 UNF ↧.50", "C0.5", "0°30'", "45° +1°/-0°30'").map((text) => ({ unit: "in" as const, text })),
+  fc
+    .constantFrom("M8x1.25-6g", "1/2-13 UNC-2A THRU", "#10-32 UNF ↧.50", "C0.5", "0°30'", "45° +1°/-0°30'")
+    .map((text) => ({ unit: "in" as const, text })),
 );
 const callouts = fc.oneof({ weight: 4, arbitrary: sized }, { weight: 1, arbitrary: others });
 const styles: readonly CalloutStyle[] = [
@@ -52,7 +60,9 @@ const styles: readonly CalloutStyle[] = [
 
 /** What a request says, without how and where it was written. */
 function meaning(request: CalloutRequest): unknown {
-  return JSON.parse(JSON.stringify(request, (key, value: unknown) => (key === "text" || key === "parts" ? undefined : value)));
+  return JSON.parse(
+    JSON.stringify(request, (key, value: unknown) => (key === "text" || key === "parts" ? undefined : value)),
+  );
 }
 
 describe("writeCallout", () => {
@@ -103,7 +113,14 @@ describe("mutated texts", () => {
   // 100 000 texts: whole callouts with one place changed, and noise
   it("only a LimitsError, never half-read", () => {
     const noise = fc.string({ unit: "binary", maxLength: 40 });
-    const changed = fc.tuple(callouts, fc.nat(), fc.oneof(fc.string({ unit: "binary", maxLength: 2 }), fc.constantFrom("°", "X", "/", "-", "(", "]", "7", " ", "\n")));
+    const changed = fc.tuple(
+      callouts,
+      fc.nat(),
+      fc.oneof(
+        fc.string({ unit: "binary", maxLength: 2 }),
+        fc.constantFrom("°", "X", "/", "-", "(", "]", "7", " ", "\n"),
+      ),
+    );
     let tried = 0;
     fc.assert(
       fc.property(fc.array(changed, { minLength: 20, maxLength: 20 }), noise, (many, raw) => {

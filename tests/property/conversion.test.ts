@@ -10,10 +10,14 @@ const RUNS = { numRuns: 3000 };
 type System = "mm" | "in";
 
 /** Total tolerances that the rule knows, spread over the decades, with the ends of its rows and their neighbours. */
-function tolerance(to: System): fc.Arbitrary<number> {
+function tolerance(to: System, step: number): fc.Arbitrary<number> {
   // to mm: .00001 in to just below 1 in; to inches: from 25 millionths of an inch on
   const [least, most] = to === "mm" ? [2540, 254_000_000 - 1] : [6350, 6_350_000_000];
-  const ends = Array.from({ length: 7 }, (_, decade) => least * 10 ** decade).flatMap((end) => [end - 1, end, end + 1]);
+  const ends = Array.from({ length: 7 }, (_, decade) => least * 10 ** decade).flatMap((end) => [
+    end - step,
+    end,
+    end + step,
+  ]);
   return fc
     .oneof(
       fc.integer({ min: least, max: most }),
@@ -23,11 +27,8 @@ function tolerance(to: System): fc.Arbitrary<number> {
       // as drawings have them: whole micrometres, ten-thousandths of an inch
       fc.integer({ min: 1, max: 600 }).map((steps) => steps * (to === "mm" ? 25_400 : 10_000)),
     )
+    .map((ticks) => ticks - (ticks % step))
     .filter((ticks) => ticks >= least && ticks <= most);
-}
-
-function unitOf(to: System): fc.Arbitrary<LengthUnit> {
-  return to === "mm" ? fc.constantFrom("in", "thou", "uin") : fc.constantFrom("mm", "um");
 }
 
 interface Asked {
@@ -35,27 +36,35 @@ interface Asked {
   readonly to: System;
 }
 
-/** Limits in the one system, to be converted to the other one. */
-const asked: fc.Arbitrary<Asked> = fc.constantFrom<System>("mm", "in").chain((to) =>
-  fc
+/** Limits in the one system, whole multiples of a number of ticks, to be converted to the other one. */
+function limitsOf(to: System, step: number): fc.Arbitrary<Asked> {
+  const units: readonly LengthUnit[] = to === "mm" ? ["in", "thou", "uin"] : ["mm", "um"];
+  const whole = (ticks: number): number => ticks - (ticks % step);
+  return fc
     .record({
       nominal: fc.oneof(
         fc.integer({ min: -1_000_000_000, max: 31_500_000_000 }),
         fc.integer({ min: 0, max: 40_000 }).map((steps) => steps * (to === "mm" ? 254_000 : 100_000)),
       ),
-      width: tolerance(to),
+      width: tolerance(to, step),
       offset: fc.oneof(fc.constant(0), fc.integer({ min: -5_000_000, max: 5_000_000 })),
-      unit: unitOf(to),
+      unit: fc.constantFrom(...units),
     })
     .map(({ nominal, width, offset, unit }) => ({
       to,
       original: limits({
-        nominal: lengthOfTicks(nominal, unit),
-        upper: lengthOfTicks(offset + width, unit),
-        lower: lengthOfTicks(offset, unit),
+        nominal: lengthOfTicks(whole(nominal), unit),
+        upper: lengthOfTicks(whole(offset) + width, unit),
+        lower: lengthOfTicks(whole(offset), unit),
       }),
-    })),
-);
+    }));
+}
+
+const system = fc.constantFrom<System>("mm", "in");
+/** As a drawing writes them: they end in decimals of their own unit (127 ticks are half a millionth of an inch). */
+const drawn = system.chain((to) => limitsOf(to, to === "mm" ? 127 : 1));
+/** Any whole ticks: an inch size with the deviations of an ISO class does not end in inches. */
+const anyTicks = system.chain((to) => limitsOf(to, 1));
 
 /** The answer where there is one: inside rounding may leave no size, which is checked on its own. */
 function converted({ original, to }: Asked, method: "A" | "B", places?: number): ConvertedLimits | null {
@@ -70,6 +79,11 @@ function roundedTicks(ticks: number, to: System, places: number, rounding: Decim
   return new Exact(ticks).div(TICKS[to]).toDecimalPlaces(places, rounding).mul(TICKS[to]);
 }
 
+/** True where both limits end in decimals of the system that they are converted from. */
+function isWritten({ max, min }: Limits, to: System): boolean {
+  return to === "in" || (max.ticks % 127 === 0 && min.ticks % 127 === 0);
+}
+
 /** Decimals by the published rule, worked out on its own: table to mm, bound of 2 per cent to inches. */
 function ruledPlaces(tolerance: number, to: System): number {
   if (to === "mm") {
@@ -81,7 +95,10 @@ function ruledPlaces(tolerance: number, to: System): number {
   return places;
 }
 
-describe("convertLimits", () => {
+describe.each([
+  { name: "limits as drawings have them", asked: drawn, step: 127 },
+  { name: "limits of any whole ticks", asked: anyTicks, step: 1 },
+])("convertLimits: $name", ({ asked, step }) => {
   it("method B is always inside the exact limits, by the rule and by any decimals", () => {
     let answered = 0;
     fc.assert(
@@ -142,16 +159,19 @@ describe("convertLimits", () => {
   it("keeps the decimals of the rule, which goes by the total tolerance alone", () => {
     fc.assert(
       fc.property(asked, fc.integer({ min: -10_000_000_000, max: 10_000_000_000 }), (one, shift) => {
-        const expected = ruledPlaces(one.original.tolerance.ticks, one.to);
         const { nominal, upperDeviation, lowerDeviation } = one.original;
         const moved = limits({
-          nominal: lengthOfTicks(nominal.ticks + shift, nominal.unit),
+          nominal: lengthOfTicks(nominal.ticks + shift - (shift % step), nominal.unit),
           upper: upperDeviation,
           lower: lowerDeviation,
         });
-        for (const method of ["A", "B"] as const) {
-          expect(convertLimits(one.original, one.to, { method }).places).toBe(expected);
-          expect(convertLimits(moved, one.to, { method }).places).toBe(expected);
+        for (const original of [one.original, moved]) {
+          for (const method of ["A", "B"] as const) {
+            const { places, maxShift, minShift } = convertLimits(original, one.to, { method });
+            if (isWritten(original, one.to)) expect(places).toBe(ruledPlaces(original.tolerance.ticks, one.to));
+            // limits that no inch decimals end are metric ones: nothing to convert, nothing to round
+            else expect([maxShift.ticks, minShift.ticks]).toEqual([0, 0]);
+          }
         }
       }),
       { numRuns: 1000 },
@@ -176,7 +196,8 @@ describe("convertLimits", () => {
           expect(min.sub(original.min.ticks).eq(answer.minShift.ticks)).toBe(true);
           expect(answer.lost.ticks).toBe(original.tolerance.ticks - answer.limits.tolerance.ticks);
           expect(answer.oversteps).toBe(max.gt(original.max.ticks) || min.lt(original.min.ticks));
-          for (const shift of [answer.maxShift, answer.minShift, answer.lost]) expect(Object.is(shift.ticks, -0)).toBe(false);
+          for (const shift of [answer.maxShift, answer.minShift, answer.lost])
+            expect(Object.is(shift.ticks, -0)).toBe(false);
         }
       }),
       RUNS,
@@ -189,7 +210,15 @@ describe("convertLimits", () => {
         const direct = convertLimits(original, to, { method });
         const sent = JSON.parse(JSON.stringify(direct)) as ConvertedLimits;
         for (const back of [asLimits(sent.limits), asLimits(structuredClone(direct).limits)]) {
-          for (const key of ["nominal", "upperDeviation", "lowerDeviation", "max", "min", "tolerance", "mean"] as const) {
+          for (const key of [
+            "nominal",
+            "upperDeviation",
+            "lowerDeviation",
+            "max",
+            "min",
+            "tolerance",
+            "mean",
+          ] as const) {
             expect(back[key].ticks).toBe(direct.limits[key].ticks);
           }
           expect(back.basis).toEqual(direct.limits.basis);
@@ -201,20 +230,25 @@ describe("convertLimits", () => {
           minShift: direct.minShift.toJSON(),
           lost: direct.lost.toJSON(),
         });
-        // what travelled converts alike
-        const again = JSON.parse(JSON.stringify(original)) as LimitsLike;
-        expect(convertLimits(again, to, { method }).limits.max.ticks).toBe(direct.limits.max.ticks);
+        // what travelled converts alike; JSON keeps the unit of what ends in its own decimals
+        expect(JSON.stringify(convertLimits(structuredClone(original), to, { method }))).toBe(JSON.stringify(direct));
+        if (step === 127) {
+          const again = JSON.parse(JSON.stringify(original)) as LimitsLike;
+          expect(JSON.stringify(convertLimits(again, to, { method }))).toBe(JSON.stringify(direct));
+        }
       }),
       { numRuns: 1500 },
     );
   });
+});
 
-  it("the dual text reads back to both pairs, where the original ends in its unit", () => {
+describe("the dual text", () => {
+  it("reads back to both pairs of limits", () => {
     const written = fc
       .record({
         to: fc.constantFrom<System>("mm", "in"),
         size: fc.integer({ min: 1000, max: 400_000 }),
-        width: fc.integer({ min: 1, max: 900 }),
+        width: fc.integer({ min: 7, max: 900 }),
         places: fc.integer({ min: 3, max: 4 }),
       })
       .map(({ to, size, width, places }) => {
@@ -271,7 +305,16 @@ describe("judgeMeasurement", () => {
       const guard = GUARDS[rule](uncertainty);
       // at and about each of the six borders, or anywhere
       const border = [min - guard, min, min + guard, max - guard, max, max + guard][where];
-      return { min, max, guard, uncertainty, rule, unit, other, reading: border === undefined ? min + far : border + near };
+      return {
+        min,
+        max,
+        guard,
+        uncertainty,
+        rule,
+        unit,
+        other,
+        reading: border === undefined ? min + far : border + near,
+      };
     });
 
   it("agrees with a plain comparison of whole numbers, for all three rules", () => {
@@ -293,7 +336,9 @@ describe("judgeMeasurement", () => {
         expect(answer.guardBand.ticks).toBe(guard);
         expect([answer.rejection.min.ticks, answer.rejection.max.ticks]).toEqual([min - guard, max + guard]);
         const zone = min + guard <= max - guard ? [min + guard, max - guard] : null;
-        expect(answer.acceptance === null ? null : [answer.acceptance.min.ticks, answer.acceptance.max.ticks]).toEqual(zone);
+        expect(answer.acceptance === null ? null : [answer.acceptance.min.ticks, answer.acceptance.max.ticks]).toEqual(
+          zone,
+        );
         expect(answer.margin.ticks).toBe(Math.min(max - reading, reading - min));
         expect(answer.margin.unit).toBe(unit);
         expect(answer.reading.ticks).toBe(reading);
@@ -316,7 +361,11 @@ describe("judgeMeasurement", () => {
   it("a wider guard band never turns a verdict from one side to the other", () => {
     fc.assert(
       fc.property(judged, fc.integer({ min: 0, max: 3_000_000 }), ({ min, max, uncertainty, reading }, more) => {
-        const size = limits({ nominal: lengthOfTicks(min, "mm"), upper: lengthOfTicks(max - min, "mm"), lower: "0 mm" });
+        const size = limits({
+          nominal: lengthOfTicks(min, "mm"),
+          upper: lengthOfTicks(max - min, "mm"),
+          lower: "0 mm",
+        });
         const verdict = (u: number): Verdict =>
           judgeMeasurement(size, lengthOfTicks(reading, "mm"), {
             rule: "ISO 14253-1:2013",

@@ -12,11 +12,52 @@ const block: TitleBlockSpec = {
 };
 // what callouts are made of, so that mutations come near to sense
 const pieces = fc.constantFrom(
-  "⌀", "Ø", "1.375", ".875", "25", "7 3/8", "1-1/4", "H7", "m6", "js9", "zz9", "+", "-", "\u2212", "±", "+/-", "/", ".002",
-  "0", "(", ")", "[", "]", "°", "'", '"', " ", "MAX", "MIN", "REF", "BASIC", "mm", "in", "µm", "\u03bcm", ",", "\u0000", "\u{1F600}", "\ud800",
+  "⌀",
+  "Ø",
+  "1.375",
+  ".875",
+  "25",
+  "7 3/8",
+  "1-1/4",
+  "H7",
+  "m6",
+  "js9",
+  "zz9",
+  "+",
+  "-",
+  "\u2212",
+  "±",
+  "+/-",
+  "/",
+  ".002",
+  "0",
+  "(",
+  ")",
+  "[",
+  "]",
+  "°",
+  "'",
+  '"',
+  " ",
+  "MAX",
+  "MIN",
+  "REF",
+  "BASIC",
+  "mm",
+  "in",
+  "µm",
+  "\u03bcm",
+  ",",
+  "\u0000",
+  "\u{1F600}",
+  "\ud800",
 );
 const nearCallouts = fc.array(pieces, { maxLength: 12 }).map((parts) => parts.join(""));
-const anyText = fc.oneof(nearCallouts, fc.string({ unit: "binary", maxLength: 300 }), fc.string({ unit: "grapheme", maxLength: 60 }));
+const anyText = fc.oneof(
+  nearCallouts,
+  fc.string({ unit: "binary", maxLength: 300 }),
+  fc.string({ unit: "grapheme", maxLength: 60 }),
+);
 
 describe("texts", () => {
   it("no text makes the readers throw anything but a LimitsError", () => {
@@ -75,7 +116,10 @@ describe("title block", () => {
 
 describe("sheets", () => {
   const feature = fc.oneof(
-    fc.record({ id: fc.string({ maxLength: 3 }), callout: anyText, mate: fc.string({ maxLength: 3 }) }, { requiredKeys: [] }),
+    fc.record(
+      { id: fc.string({ maxLength: 3 }), callout: anyText, mate: fc.string({ maxLength: 3 }) },
+      { requiredKeys: [] },
+    ),
     fc.jsonValue({ maxDepth: 2 }),
   );
 
@@ -86,7 +130,13 @@ describe("sheets", () => {
         const { counts } = sheet;
         expect(sheet.rows.map(({ index }) => index)).toEqual(features.map((_, index) => index));
         expect(
-          counts.limits + counts.fitCallouts + counts.singleLimits + counts.angles + counts.chamfers + counts.withoutLimits + counts.failed,
+          counts.limits +
+            counts.fitCallouts +
+            counts.singleLimits +
+            counts.angles +
+            counts.chamfers +
+            counts.withoutLimits +
+            counts.failed,
         ).toBe(features.length);
         expect(counts.fits + counts.fitsFailed).toBe(sheet.fits.length);
         expect(JSON.stringify(sheet)).not.toMatch(/NaN|Infinity/);
@@ -96,15 +146,21 @@ describe("sheets", () => {
   });
 
   it("any JSON: a sheet, or a LimitsError", () => {
-    fc.assert(fc.property(fc.jsonValue(), (json) => void attempt(() => resolveSheet(json))), { numRuns: 1000 });
+    fc.assert(
+      fc.property(fc.jsonValue(), (json) => void attempt(() => resolveSheet(json))),
+      { numRuns: 1000 },
+    );
   });
 
   it("any value at all: a sheet, or a LimitsError", () => {
     fc.assert(
-      fc.property(fc.anything({ withBigInt: true, withDate: true, withMap: true, withNullPrototype: true }), (value) => {
-        attempt(() => resolveSheet({ drawing: "d", unit: "in", features: [value], note: value }));
-        attempt(() => resolveSheet(value));
-      }),
+      fc.property(
+        fc.anything({ withBigInt: true, withDate: true, withMap: true, withNullPrototype: true }),
+        (value) => {
+          attempt(() => resolveSheet({ drawing: "d", unit: "in", features: [value], note: value }));
+          attempt(() => resolveSheet(value));
+        },
+      ),
       { numRuns: 1000 },
     );
   });

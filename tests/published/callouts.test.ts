@@ -1,5 +1,12 @@
 import { attempt, readCallout, writeCallout } from "limitsmith";
-import type { CalloutOptions, CalloutRequest, CalloutStyle, DecimalMark, LengthUnit, WrittenDimension } from "limitsmith";
+import type {
+  CalloutOptions,
+  CalloutRequest,
+  CalloutStyle,
+  DecimalMark,
+  LengthUnit,
+  WrittenDimension,
+} from "limitsmith";
 import { describe, expect, it } from "vitest";
 import { thrown } from "../support/thrown.js";
 import { readCases } from "./readCases.js";
@@ -104,7 +111,9 @@ function byKind(request: CalloutRequest): Compact {
   }
 }
 
-function own(deviations: { readonly upper: { toString(): string }; readonly lower: { toString(): string } } | null): Compact {
+function own(
+  deviations: { readonly upper: { toString(): string }; readonly lower: { toString(): string } } | null,
+): Compact {
   return deviations === null ? {} : { upper: deviations.upper.toString(), lower: deviations.lower.toString() };
 }
 
@@ -172,7 +181,10 @@ describe("callouts as drafters write them", () => {
         const where = parts.filter(({ part }) => part === name).map(({ start, end }) => text.slice(start, end));
         // a chamfer written C0.5 has no angle in its text
         if (name === "angle" && /^(?:\d+X )?C/.test(text)) continue;
-        expect(where.some((slice) => slice.includes(piece)), `${name} of ${text}: ${where.join(" | ")}`).toBe(true);
+        expect(
+          where.some((slice) => slice.includes(piece)),
+          `${name} of ${text}: ${where.join(" | ")}`,
+        ).toBe(true);
       }
     }
     expect(read).toBeGreaterThan(400);
@@ -190,7 +202,9 @@ describe("callouts as drafters write them", () => {
       if (!answer.ok) continue; // has failed above, by its name
       for (const style of styles) {
         const written = writeCallout(answer.value, style);
-        const again = attempt(() => readCallout(written, { ...optionsOf(input), decimalMark: style.decimalMark ?? "." }));
+        const again = attempt(() =>
+          readCallout(written, { ...optionsOf(input), decimalMark: style.decimalMark ?? "." }),
+        );
         if (!again.ok) different.push(`${named(input)} → ${written}: ${again.error.code}`);
         else if (meaning(again.value) !== meaning(answer.value)) different.push(`${named(input)} → ${written}`);
       }

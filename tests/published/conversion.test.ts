@@ -27,7 +27,8 @@ interface Topic {
 }
 
 function casesOf<Input, Expected>(topic: string): readonly (Case<Input, Expected> & Topic)[] {
-  return file.cases.filter((one) => (one as Case<unknown, unknown> & Topic).topic === topic) as (Case<Input, Expected> & Topic)[];
+  return file.cases.filter((one) => (one as Case<unknown, unknown> & Topic).topic === topic) as (Case<Input, Expected> &
+    Topic)[];
 }
 
 const Exact = Decimal.clone({ precision: 60, defaults: true });
@@ -82,7 +83,12 @@ describe("conversion examples", () => {
       if (sizes === undefined) continue;
       const { limits: got, places: kept } = as(method);
       expect([got.min.ticks, got.max.ticks]).toEqual(
-        sizes.map((text) => new Exact(text).mul(input.to === "mm" ? 1 : "25.4").mul(PER_MM).toNumber()),
+        sizes.map((text) =>
+          new Exact(text)
+            .mul(input.to === "mm" ? 1 : "25.4")
+            .mul(PER_MM)
+            .toNumber(),
+        ),
       );
       expect(got.max.unit).toBe(input.to);
       if (expected?.places !== undefined) expect(kept).toBe(expected.places);
@@ -108,7 +114,9 @@ describe("conversion examples", () => {
 });
 
 describe("fineness", () => {
-  const cases = casesOf<{ total_tolerance: string; unit: "mm" | "in"; to: "mm" | "in" }, { fineness: string }>("fineness");
+  const cases = casesOf<{ total_tolerance: string; unit: "mm" | "in"; to: "mm" | "in" }, { fineness: string }>(
+    "fineness",
+  );
   it.each(cases.map((one) => [`${one.input.total_tolerance} ${one.input.unit} ${one.why ?? ""}`, one] as const))(
     "%s",
     (_name, { input, expected }) => {
@@ -143,7 +151,10 @@ describe("the identity of 2 per cent", () => {
     "$input.smallest_tolerance in",
     ({ input, expected }) => {
       // half the fineness over the smallest tolerance of the row
-      const identity = new Exact(input.fineness_mm).div(2).div(new Exact(input.smallest_tolerance).mul("25.4")).mul(100);
+      const identity = new Exact(input.fineness_mm)
+        .div(2)
+        .div(new Exact(input.smallest_tolerance).mul("25.4"))
+        .mul(100);
       expect(identity.toFixed(2)).toBe(expected?.percent);
       const size = limits({ nominal: "1 in", upper: `${input.smallest_tolerance} in`, lower: "0 in" });
       const { places } = convertLimits(size, "mm", { method: "A" });

@@ -233,6 +233,19 @@ describe("preferred series", () => {
     });
   });
 
+  it("no other value has a partner", () => {
+    const metric = new Set([...(asme?.expected?.values_um ?? []), ...grades.cases.map((one) => one.expected?.ra_um)]);
+    const steps = [
+      ...Array.from({ length: 200 }, (_, index) => index + 1),
+      ...Array.from({ length: 3000 }, (_, index) => (index + 1) * 10),
+    ];
+    for (const thousandths of steps) {
+      const read = roughness(um(thousandths / 1000));
+      const partner = read.pair ?? read.secondChoicePair;
+      if (!metric.has(thousandths / 1000)) expect(partner).toBeNull();
+    }
+  });
+
   it("Rz, first choice", () => {
     expect(preferredRoughness("um").rz.map((one) => one.to("um"))).toEqual(rzSeries?.expected?.values_um);
   });
@@ -368,6 +381,7 @@ describe("bearing seats: every cell", () => {
       const seat = bearingSeatFinish({ diameter: lengthOfTicks(ticks, "mm"), tolerance: input.grade });
       expect(seat.ra.to("um")).toBe(expected?.ra_um);
       expect(seat.basis[0]?.mark).toBe(mark);
+      expect(seat.basis[0]?.place).toContain(`${input.grade}, over ${input.over_mm} up to ${input.to_mm} mm`);
     }
   });
 });

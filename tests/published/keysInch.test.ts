@@ -69,11 +69,12 @@ function lengthOf(text: unknown): Length {
   return lengthOfTicks(ticksOf(text), "in");
 }
 
-/** A range at its ends and in the middle. */
+/** A range at its ends and at several places between. */
 function within({ over, to_incl }: Range): Length[] {
   const low = over === null ? ticksOf("3/32") : ticksOf(over);
   const high = ticksOf(to_incl);
-  return [low + 1, low + Math.round((high - low) / 4) * 2, high].map((ticks) => lengthOfTicks(ticks, "in"));
+  const between = [1, 2, 4, 6, 7].map((eighth) => low + Math.round(((high - low) * eighth) / 16) * 2);
+  return [low + 1, ...between, high].map((ticks) => lengthOfTicks(ticks, "in"));
 }
 
 /** Printed cells against limits, both as ticks. */
@@ -160,6 +161,9 @@ describe("B17.1: key size versus shaft diameter", () => {
       }
       // the preferred shape carries the mark of the row, unless the other shape alone is less sure
       expect(preferred.basis[0]?.mark).toBe(mark);
+      expect(preferred.basis[0]?.place).toBe(
+        `Table 1, shaft over ${input.over} up to and including ${input.to_incl} in`,
+      );
     }
   });
 
@@ -445,6 +449,8 @@ describe("B17.1: details", () => {
         expect(Math.abs((leadAt(length) ?? NaN) - wanted)).toBeLessThan(1);
       }
     }
+    // close above the breaks, where the pieces join without a step
+    expect([leadAt(lengthOf("4 1/2")), leadAt(lengthOf("10 1/2"))]).toEqual([ticksOf("0.00225"), ticksOf("0.005")]);
     const seat = inchKeyseat(lengthOf("2"), { class: 1 });
     expect(seat.offset.ticks).toBe(ticksOf(of("offset")[0]?.expected?.["max"]));
     expect(seat.lead).toBeNull();

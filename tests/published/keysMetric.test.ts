@@ -156,6 +156,7 @@ describe("parallel keys: ISO/R 773, DIN 6885-1, BS 4235-1, JIS B 1301", () => {
         const key = metricKey(diameter, { standard });
         const seat = metricKeyseat(diameter, { standard, fit: "normal" });
         expect(key.standardForShaft).toBe(true);
+        expect(key.basis[0]?.place).toContain(`over ${input.d_over} to ${input.d_to} mm`);
         expect([key.width.ticks, key.height.ticks]).toEqual([ticksOf(cell("b")), ticksOf(cell("h"))]);
         expect(key.width.ticks === key.height.ticks).toBe(cell("section") === "square");
         expectUm(key.limits?.width, cell("key_b_dev_um"));
@@ -224,6 +225,7 @@ describe("JIS B 1301: bracketed sizes", () => {
     for (const diameter of within(input)) {
       const asked = { standard: "JIS B 1301", bracketed: true } as const;
       const key = metricKey(diameter, asked);
+      expect(key.basis[0]?.place).toContain(`over ${input.d_over} to ${input.d_to} mm`);
       const seat = metricKeyseat(diameter, { ...asked, fit: "close" });
       expect([key.width.ticks, key.height.ticks]).toEqual([ticksOf(expected?.["b"]), ticksOf(expected?.["h"])]);
       const um = [0, expected?.tol_um ?? NaN] as const;
@@ -261,6 +263,7 @@ describe("the other tables, each by its own name", () => {
     for (const diameter of within(input, included)) {
       const key = metricKey(diameter, { standard });
       const seat = metricKeyseat(diameter, { standard });
+      expect(key.basis[0]?.place).toContain(`over ${input.d_over} to ${input.d_to} mm`);
       expect([key.width.ticks, key.height.ticks]).toEqual([ticksOf(cell("b")), ticksOf(cell("h", "h_thick_end"))]);
       const t2 = cell("t2", "t2_back_clearance", "t2_deep_end");
       const t2Um = cell("t2_dev_um", "t2_back_clearance_dev_um");

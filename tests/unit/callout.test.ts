@@ -59,6 +59,9 @@ describe("readCallout", () => {
     ["1.5754/1.5751", inch, "limits", "1.5754 1.5751"],
     ["1.5751/1.5754", inch, "limits", "1.5754 1.5751"],
     ["25.011/25.002", metric, "limits", "25.011 25.002"],
+    ["26/24", metric, "limits", "26 24"],
+    ["24-26", metric, "limits", "26 24"],
+    ["35 f7 (-0.025/-0.050)", metric, "class", "35 f7"],
     [".015 MAX", inch, "single limit", ".015 max"],
     ["5 min", metric, "single limit", "5 min"],
     ["2.188", inch, "plain", "2.188"],
@@ -83,6 +86,17 @@ describe("readCallout", () => {
     expect(request.text).toBe(text);
     expect(request.shape).toBe(/[⌀Ø]/.test(text) ? "diameter" : "unmarked");
     expect(Object.isFrozen(request)).toBe(true);
+  });
+
+  it("limits behind a class stand as sizes or as deviations", () => {
+    for (const text of ["35 k6 (35.018/35.002)", "35 k6 (+0.018/+0.002)", "35 k6 (35.002-35.018)"]) {
+      const request = readCallout(text, metric);
+      if (request.kind !== "class") throw new Error(request.kind);
+      expect([request.printed?.max.length.toString(), request.printed?.min.length.toString()]).toEqual([
+        "35.018 mm",
+        "35.002 mm",
+      ]);
+    }
   });
 
   it("keeps the decimals as written", () => {
@@ -116,13 +130,13 @@ describe("readCallout", () => {
     ["1/2", metric, "FRACTION_NOT_INCH", [0, 3]],
     ["2.188", {}, "UNIT_MISSING", [0, 5]],
     ["1.000000001", inch, "LENGTH_TOO_FINE", [0, 11]],
-    ["25 mm ±.001 in", metric, "CALLOUT_UNIT_CONFLICT", null],
-    ["1.5754 in/40.01 mm", inch, "CALLOUT_UNIT_CONFLICT", null],
+    ["25 mm ±.001 in", metric, "CALLOUT_UNIT_CONFLICT", [0, 14]],
+    ["1.5754 in/40.01 mm", inch, "CALLOUT_UNIT_CONFLICT", [0, 18]],
     ["95°70'", inch, "ANGLE_INVALID", [0, 6]],
     ["45° MAX", inch, "CALLOUT_NOT_UNDERSTOOD", [4, 7]],
     ["1.250 ±0", inch, "CALLOUT_ZERO_TOLERANCE", [6, 8]],
     ["1.250/1.250", inch, "CALLOUT_ZERO_TOLERANCE", [0, 11]],
-    ["7 3/8 ±0.5 mm", inch, "CALLOUT_UNIT_CONFLICT", null],
+    ["7 3/8 ±0.5 mm", inch, "CALLOUT_UNIT_CONFLICT", [0, 13]],
     ["4x6.5", metric, "CALLOUT_NOT_UNDERSTOOD", [1, 2]],
     ["0X ⌀5", metric, "CALLOUT_NOT_UNDERSTOOD", [0, 1]],
     ["⌀6 THRU ↧5", metric, "CALLOUT_NOT_UNDERSTOOD", [0, 10]],
@@ -172,7 +186,10 @@ describe("resolveCallout", () => {
   it("chamfers, angles with deviations, threads and depths", () => {
     const chamfer = resolveCallout(".06 X 30°", { titleBlock });
     expect(chamfer).toMatchObject({ outcome: "chamfer" });
-    expect(chamfer.outcome === "chamfer" && [chamfer.limits.max.toString(), chamfer.angle.min.toString()]).toEqual(["0.07 in", "29°"]);
+    expect(chamfer.outcome === "chamfer" && [chamfer.limits.max.toString(), chamfer.angle.min.toString()]).toEqual([
+      "0.07 in",
+      "29°",
+    ]);
     const own = resolveCallout("30° +1°/-0°30'", inch);
     expect(own.outcome === "angle" && [own.angle.max.toString(), own.angle.min.toString()]).toEqual(["31°", "29.5°"]);
     expect(resolveCallout("1/4-20 UNC-2B THRU", { titleBlock })).toMatchObject({ outcome: "no limits", depth: null });
@@ -185,7 +202,9 @@ describe("resolveCallout", () => {
     expect(limitsOf(resolveCallout("⌀12 ±0.02", metric))).toBe("12.02 mm 11.98 mm");
     expect(limitsOf(resolveCallout("1.5751/1.5754", inch))).toBe("1.5754 in 1.5751 in");
     const single = resolveCallout(".015 MAX", inch);
-    expect(single.outcome === "single limit" && `${single.single.kind} ${single.single.limit.toString()}`).toBe("max 0.015 in");
+    expect(single.outcome === "single limit" && `${single.single.kind} ${single.single.limit.toString()}`).toBe(
+      "max 0.015 in",
+    );
   });
 
   it("the title block, whose unit and decimal mark count", () => {
@@ -216,17 +235,30 @@ describe("resolveCallout", () => {
   });
 
   it("takes a request, also one that travelled", () => {
-    for (const text of ["⌀1.25 k6", "1.25 H7/k6", "1.25 +.001/-.002", "1.251/1.250", ".015 MAX", "2.188", "45°", "(2.1)"]) {
+    for (const text of [
+      "⌀1.25 k6",
+      "1.25 H7/k6",
+      "1.25 +.001/-.002",
+      "1.251/1.250",
+      ".015 MAX",
+      "2.188",
+      "45°",
+      "(2.1)",
+    ]) {
       const request = readCallout(text, inch);
       const direct = JSON.stringify(resolveCallout(text, { titleBlock }));
       const sent = JSON.parse(JSON.stringify(request)) as CalloutRequest;
       expect(JSON.stringify(resolveCallout(structuredClone(request), { titleBlock }))).toBe(direct);
       expect(JSON.stringify(resolveCallout(sent, { titleBlock }))).toBe(direct);
     }
-    expect(codeOf(() => resolveCallout({ kind: "guess" } as unknown as CalloutRequest, inch))).toBe("CALLOUT_NOT_UNDERSTOOD");
+    expect(codeOf(() => resolveCallout({ kind: "guess" } as unknown as CalloutRequest, inch))).toBe(
+      "CALLOUT_NOT_UNDERSTOOD",
+    );
   });
 });
 
 function limitsOf(resolved: ReturnType<typeof resolveCallout>): string {
-  return resolved.outcome === "limits" ? `${resolved.limits.max.toString()} ${resolved.limits.min.toString()}` : resolved.outcome;
+  return resolved.outcome === "limits"
+    ? `${resolved.limits.max.toString()} ${resolved.limits.min.toString()}`
+    : resolved.outcome;
 }

@@ -154,7 +154,13 @@ describe("the dual text", () => {
       "25.002/25.011 [.9843/.9847]",
     ],
     ["inches first", PLATE, "mm", { method: "B" }, "1.838/1.862 [46.69/47.29]"],
-    ["decimals alike on both sides", symmetricLimits("1 in", ".005 in"), "mm", { method: "A" }, ".995/1.005 [25.27/25.53]"],
+    [
+      "decimals alike on both sides",
+      symmetricLimits("1 in", ".005 in"),
+      "mm",
+      { method: "A" },
+      ".995/1.005 [25.27/25.53]",
+    ],
     [
       "decimal comma",
       limitsFromMaxMin({ max: "25.011 mm", min: "25.002 mm" }),
@@ -173,11 +179,15 @@ describe("the dual text", () => {
     expect(convertLimits(thou, "mm", { method: "B" }).dualText).toBe("1.250/1.251 [31.750/31.775]");
   });
 
-  it("reads back to both pairs of limits", () => {
-    const { dualText, limits: converted } = convertLimits(PLATE, "mm", { method: "B" });
+  it.each([
+    ["with decimals", PLATE],
+    // 7020.9156 and 7024.0144 mm: inside, in tenths, 7021 and 7024
+    ["whole millimetres in the brackets", limitsFromMaxMin({ max: "276.536 in", min: "276.414 in" })],
+  ])("reads back to both pairs of limits: %s", (_name, size) => {
+    const { dualText, limits: converted } = convertLimits(size, "mm", { method: "B" });
     const request = readCallout(dualText, { unit: "in" });
     if (request.kind !== "limits") throw new Error(request.kind);
-    expect([request.max.length.ticks, request.min.length.ticks]).toEqual([PLATE.max.ticks, PLATE.min.ticks]);
+    expect([request.max.length.ticks, request.min.length.ticks]).toEqual([size.max.ticks, size.min.ticks]);
     expect([request.dual?.max.length.ticks, request.dual?.min.length.ticks]).toEqual([
       converted.max.ticks,
       converted.min.ticks,
@@ -195,9 +205,9 @@ describe("convertLimits refuses", () => {
     // A keeps both limits, on one size
     expect(sizes(convertLimits(narrow, "in", { method: "A", places: 2 }))).toBe("0.39 in 0.39 in");
     // one size that both limits meet is no collapse
-    expect(sizes(convertLimits(limits({ nominal: "1 in", upper: "0 in", lower: "0 in" }), "mm", { method: "B", places: 1 }))).toBe(
-      "25.4 mm 25.4 mm",
-    );
+    expect(
+      sizes(convertLimits(limits({ nominal: "1 in", upper: "0 in", lower: "0 in" }), "mm", { method: "B", places: 1 })),
+    ).toBe("25.4 mm 25.4 mm");
   });
 
   it.each<[string, string, "mm" | "in"]>([
@@ -236,7 +246,7 @@ describe("convertLimits refuses", () => {
 
   it("what is no limits", () => {
     for (const wrong of [null, undefined, 5, "1.25 in", {}, []]) {
-      expect(codeOf(() => convertLimits(wrong as unknown as LimitsLike, "mm", { method: "A" }))).toBe("LIMITS_INVALID");
+      expect(codeOf(() => convertLimits(wrong as LimitsLike, "mm", { method: "A" }))).toBe("LIMITS_INVALID");
     }
     const torn = { ...limits({ nominal: "1 in", upper: "1 thou", lower: "0 in" }), max: inch(2) };
     expect(codeOf(() => convertLimits(torn, "mm", { method: "A" }))).toBe("LIMITS_CONTRADICT");

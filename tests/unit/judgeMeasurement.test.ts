@@ -60,8 +60,12 @@ describe("judgeMeasurement", () => {
     const pin = limitsFromMaxMin({ max: ".5000 in", min: ".4995 in" });
     expect(judgeMeasurement(pin, "12.7 mm", SIMPLE).verdict).toBe("pass");
     expect(judgeMeasurement(pin, "12.7000001 mm", SIMPLE).verdict).toBe("fail");
-    expect(judgeMeasurement(pin, ".49995 in", { rule: "ISO 14253-1:2013", uncertainty: "1.27 µm" }).verdict).toBe("pass");
-    expect(judgeMeasurement(pin, ".49996 in", { rule: "ISO 14253-1:2013", uncertainty: "1.27 µm" }).verdict).toBe("not proven");
+    expect(judgeMeasurement(pin, ".49995 in", { rule: "ISO 14253-1:2013", uncertainty: "1.27 µm" }).verdict).toBe(
+      "pass",
+    );
+    expect(judgeMeasurement(pin, ".49996 in", { rule: "ISO 14253-1:2013", uncertainty: "1.27 µm" }).verdict).toBe(
+      "not proven",
+    );
     const { guardBand, acceptance, margin } = judgeMeasurement(pin, ".4998 in", {
       rule: "ISO 14253-1:2013",
       uncertainty: "1.27 µm",
@@ -103,7 +107,8 @@ describe("judgeMeasurement", () => {
 
   it("an uncertainty of nothing is simple acceptance", () => {
     for (const rule of ["ISO 14253-1:2013", "ISO 14253-1:2017"] as const) {
-      const verdict = (reading: LengthLike): Verdict => judgeMeasurement(BORE, reading, { rule, uncertainty: "0 mm" }).verdict;
+      const verdict = (reading: LengthLike): Verdict =>
+        judgeMeasurement(BORE, reading, { rule, uncertainty: "0 mm" }).verdict;
       expect(verdict("10.010 mm")).toBe("pass");
       expect(verdict("9.990 mm")).toBe("pass");
       expect(verdict("10.0100001 mm")).toBe("fail");
@@ -119,7 +124,9 @@ describe("judgeMeasurement", () => {
     const crossing = judgeMeasurement(BORE, "10 mm", { rule: "ISO 14253-1:2013", uncertainty: "10.0001 µm" });
     expect(crossing.acceptance).toBeNull();
     expect(crossing.verdict).toBe("not proven");
-    expect(judgeMeasurement(BORE, "10.0200001 mm", { rule: "ISO 14253-1:2013", uncertainty: "10.0001 µm" }).verdict).toBe("fail");
+    expect(
+      judgeMeasurement(BORE, "10.0200001 mm", { rule: "ISO 14253-1:2013", uncertainty: "10.0001 µm" }).verdict,
+    ).toBe("fail");
   });
 
   it("a tolerance of nothing takes its one size", () => {
@@ -185,7 +192,7 @@ describe("judgeMeasurement refuses", () => {
 
   it("what is no limits", () => {
     for (const wrong of [null, undefined, "10 mm", {}]) {
-      expect(codeOf(() => judgeMeasurement(wrong as unknown as LimitsLike, "10 mm", SIMPLE))).toBe("LIMITS_INVALID");
+      expect(codeOf(() => judgeMeasurement(wrong as LimitsLike, "10 mm", SIMPLE))).toBe("LIMITS_INVALID");
     }
   });
 });

@@ -17,17 +17,39 @@ const drawing: SheetSpec = { drawing: "Hopper shaft (invented)", unit: "mm", fea
 const drawings: [string, boolean, unknown][] = [
   ["the example drawing", true, example],
   ["the smallest drawing", true, { ...drawing, features: [] }],
-  ["every key", true, {
-    ...drawing,
-    decimalMark: ",",
-    note: "n",
-    titleBlock: { unit: "mm", decimals: { "1": "±0,2" }, angles: "±1°" },
-    features: [
-      { ...feature, name: "n", kind: "shaft", mate: "B", note: "n", finish: "Ra 0,8", process: "grinding", function: "bearing seat" },
-      { id: "K", name: "n", note: "n", keyseat: { standard: "ISO/R 773", on: "A", member: "shaft", fit: "normal", printed: { width: "5" } } },
-    ],
-  }],
-  ["a keyseat and a callout", false, { ...drawing, features: [{ ...feature, keyseat: { standard: "B17.1", on: "A" } }] }],
+  [
+    "every key",
+    true,
+    {
+      ...drawing,
+      decimalMark: ",",
+      note: "n",
+      titleBlock: { unit: "mm", decimals: { "1": "±0,2" }, angles: "±1°" },
+      features: [
+        {
+          ...feature,
+          name: "n",
+          kind: "shaft",
+          mate: "B",
+          note: "n",
+          finish: "Ra 0,8",
+          process: "grinding",
+          function: "bearing seat",
+        },
+        {
+          id: "K",
+          name: "n",
+          note: "n",
+          keyseat: { standard: "ISO/R 773", on: "A", member: "shaft", fit: "normal", printed: { width: "5" } },
+        },
+      ],
+    },
+  ],
+  [
+    "a keyseat and a callout",
+    false,
+    { ...drawing, features: [{ ...feature, keyseat: { standard: "B17.1", on: "A" } }] },
+  ],
   ["a keyseat on nothing", false, { ...drawing, features: [{ id: "K", keyseat: { standard: "B17.1" } }] }],
   ["no unit", false, { ...drawing, unit: undefined }],
   ["an unknown unit", false, { ...drawing, unit: "cm" }],
@@ -56,7 +78,8 @@ describe("schemas of a drawing file", () => {
     const look = (schema: unknown, path: string): void => {
       const { properties = {}, items } = schema as { properties?: Record<string, unknown>; items?: unknown };
       for (const [name, property] of Object.entries(properties)) {
-        if (typeof (property as { description?: unknown }).description !== "string") undescribed.push(`${path}.${name}`);
+        if (typeof (property as { description?: unknown }).description !== "string")
+          undescribed.push(`${path}.${name}`);
         look(property, `${path}.${name}`);
       }
       if (items !== undefined) look(items, `${path}[]`);

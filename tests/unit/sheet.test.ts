@@ -83,7 +83,10 @@ describe("resolveSheet", () => {
     ]);
     expect(sheet.counts.failed + sheet.counts.limits).toBe(13);
     const wrongKind = sheet.rows[9];
-    expect(wrongKind?.ok === false && wrongKind.error).toMatchObject({ value: "bore", message: "one of hole, shaft is needed here" });
+    expect(wrongKind?.ok === false && wrongKind.error).toMatchObject({
+      value: "bore",
+      message: "one of hole, shaft is needed here",
+    });
   });
 
   it("reports unknown keys and reads on", () => {
@@ -91,7 +94,9 @@ describe("resolveSheet", () => {
       scale: "1:1",
       titleBlock: { ...drawing.titleBlock, weights: "kg" },
     });
-    expect(sheet.unknownKeys).toEqual(expect.arrayContaining([["scale"], ["titleBlock", "weights"], ["features", 0, "colour"]]));
+    expect(sheet.unknownKeys).toEqual(
+      expect.arrayContaining([["scale"], ["titleBlock", "weights"], ["features", 0, "colour"]]),
+    );
     expect(sheet.unknownKeys).toHaveLength(3);
     expect(sheet.counts.failed).toBe(0);
   });
@@ -153,7 +158,10 @@ describe("resolveSheet", () => {
   });
 
   it("a thousand rows", () => {
-    const features = Array.from({ length: 1000 }, (_, index) => ({ id: `f${index}`, callout: index % 10 === 0 ? "?" : "2.063" }));
+    const features = Array.from({ length: 1000 }, (_, index) => ({
+      id: `f${index}`,
+      callout: index % 10 === 0 ? "?" : "2.063",
+    }));
     expect(sheetOf(features).counts).toMatchObject({ features: 1000, limits: 900, failed: 100 });
   });
 });
@@ -165,13 +173,24 @@ describe("mates", () => {
   it.each([
     ["named at the shaft", [{ ...seat, mate: "B" }, bore]],
     ["named at the hole", [seat, { ...bore, mate: "S" }]],
-    ["named at both", [{ ...seat, mate: "B" }, { ...bore, mate: "S" }]],
+    [
+      "named at both",
+      [
+        { ...seat, mate: "B" },
+        { ...bore, mate: "S" },
+      ],
+    ],
   ])("one fit a pair: %s", (_, features) => {
     const { fits, counts } = sheetOf(features);
     // ISO 286-2:2010, 28 H7 +21/0, k6 +15/+2
-    expect(fits).toMatchObject([{ ok: true, hole: "B", shaft: "S", fit: { kind: "transition", designation: "H7/k6" } }]);
+    expect(fits).toMatchObject([
+      { ok: true, hole: "B", shaft: "S", fit: { kind: "transition", designation: "H7/k6" } },
+    ]);
     const [one] = fits;
-    expect(one?.ok === true && [one.fit.maxClearance.toString(), one.fit.minClearance.toString()]).toEqual(["19 µm", "-15 µm"]);
+    expect(one?.ok === true && [one.fit.maxClearance.toString(), one.fit.minClearance.toString()]).toEqual([
+      "19 µm",
+      "-15 µm",
+    ]);
     expect(counts).toMatchObject({ fits: 1, fitsFailed: 0 });
   });
 
@@ -186,11 +205,46 @@ describe("mates", () => {
   it.each<[string, unknown[], string]>([
     ["no such feature", [{ ...seat, mate: "X" }], "MATE_UNKNOWN"],
     ["itself", [{ ...seat, mate: "S" }], "MATE_UNKNOWN"],
-    ["two shafts", [{ ...seat, mate: "T" }, { id: "T", callout: "⌀28 mm h6" }], "MATE_KIND_INVALID"],
-    ["kind not said", [{ id: "S", callout: "2.063", mate: "T" }, { id: "T", callout: "2.063", kind: "hole" }], "MATE_KIND_INVALID"],
-    ["one failed", [{ ...seat, mate: "T" }, { id: "T", callout: "⌀28 mm t99" }], "MATE_UNRESOLVED"],
-    ["one is a reference", [{ ...seat, mate: "T" }, { id: "T", callout: "(1.1)", kind: "hole" }], "MATE_UNRESOLVED"],
-    ["other nominal", [{ ...seat, mate: "T" }, { id: "T", callout: "⌀30 mm H7" }], "NOMINALS_DIFFER"],
+    [
+      "two shafts",
+      [
+        { ...seat, mate: "T" },
+        { id: "T", callout: "⌀28 mm h6" },
+      ],
+      "MATE_KIND_INVALID",
+    ],
+    [
+      "kind not said",
+      [
+        { id: "S", callout: "2.063", mate: "T" },
+        { id: "T", callout: "2.063", kind: "hole" },
+      ],
+      "MATE_KIND_INVALID",
+    ],
+    [
+      "one failed",
+      [
+        { ...seat, mate: "T" },
+        { id: "T", callout: "⌀28 mm t99" },
+      ],
+      "MATE_UNRESOLVED",
+    ],
+    [
+      "one is a reference",
+      [
+        { ...seat, mate: "T" },
+        { id: "T", callout: "(1.1)", kind: "hole" },
+      ],
+      "MATE_UNRESOLVED",
+    ],
+    [
+      "other nominal",
+      [
+        { ...seat, mate: "T" },
+        { id: "T", callout: "⌀30 mm H7" },
+      ],
+      "NOMINALS_DIFFER",
+    ],
   ])("%s", (_, features, code) => {
     const { fits, counts } = sheetOf(features);
     expect(fits).toMatchObject([{ ok: false, error: { code } }]);
@@ -227,11 +281,14 @@ describe("the result as data", () => {
     for (const one of [sent, cloned]) {
       const [seatRow, boreRow] = one.rows;
       if (seatRow?.ok !== true || boreRow?.ok !== true) throw new Error("both resolve");
-      if (seatRow.resolved.outcome !== "limits" || boreRow.resolved.outcome !== "limits") throw new Error("both have limits");
+      if (seatRow.resolved.outcome !== "limits" || boreRow.resolved.outcome !== "limits")
+        throw new Error("both have limits");
       expect(asLimits(seatRow.resolved.limits).max.toString()).toBe("28.015 mm");
       expect(fitOf(boreRow.resolved.limits, seatRow.resolved.limits).kind).toBe("transition");
     }
-    expect(JSON.stringify(resolveSheet({ ...drawing, features: [{ id: "S", callout: "⌀28 mm k6" }] }))).not.toContain("NaN");
+    expect(JSON.stringify(resolveSheet({ ...drawing, features: [{ id: "S", callout: "⌀28 mm k6" }] }))).not.toContain(
+      "NaN",
+    );
   });
 });
 
@@ -244,16 +301,13 @@ describe("keyseats", () => {
 
   function limitsText(row: SheetRow | undefined): string[] {
     if (row?.ok !== true || row.resolved.outcome !== "keyseat") return [errorOf(row)];
-    return row.resolved.seat.rows.map(({ symbol, limits }) => `${symbol} ${limits?.max.toString() ?? "-"} ${limits?.min.toString() ?? "-"}`);
+    return row.resolved.seat.rows.map(
+      ({ symbol, limits }) => `${symbol} ${limits?.max.toString() ?? "-"} ${limits?.min.toString() ?? "-"}`,
+    );
   }
 
   it("S and width in the shaft, T and width in the hub, wherever they stand", () => {
-    const sheet = sheetOf([
-      { id: "K1", keyseat: seat({}) },
-      shaft,
-      bore,
-      { id: "K2", keyseat: seat({ on: "B" }) },
-    ]);
+    const sheet = sheetOf([{ id: "K1", keyseat: seat({}) }, shaft, bore, { id: "K2", keyseat: seat({ on: "B" }) }]);
     expect(limitsText(sheet.rows[0])).toEqual(["S 0.986 in 0.971 in", "W 0.252 in 0.25 in"]);
     expect(limitsText(sheet.rows[3])).toEqual(["T 1.251 in 1.241 in", "W 0.252 in 0.25 in"]);
     expect(sheet.counts).toMatchObject({ features: 4, limits: 2, keyseats: 2, failed: 0 });
@@ -289,8 +343,16 @@ describe("keyseats", () => {
     ["on itself", seat({ on: "K" }), "KEYSEAT_ON_UNKNOWN features.1.keyseat.on"],
     ["a class that is none", seat({ class: 7 }), "OPTION_INVALID features.1.keyseat.class"],
     ["no standard known", seat({ standard: "B99" }), "OPTION_INVALID features.1.keyseat.standard"],
-    ["printed nonsense", seat({ printed: { width: "wide" } }), "CALLOUT_NOT_UNDERSTOOD features.1.keyseat.printed.width"],
-    ["printed without limits", seat({ printed: { width: "(.25)" } }), "CALLOUT_NOT_UNDERSTOOD features.1.keyseat.printed.width"],
+    [
+      "printed nonsense",
+      seat({ printed: { width: "wide" } }),
+      "CALLOUT_NOT_UNDERSTOOD features.1.keyseat.printed.width",
+    ],
+    [
+      "printed without limits",
+      seat({ printed: { width: "(.25)" } }),
+      "CALLOUT_NOT_UNDERSTOOD features.1.keyseat.printed.width",
+    ],
   ])("%s costs this row only", (_, keyseat, error) => {
     const sheet = sheetOf([shaft, { id: "K", keyseat }]);
     expect(errorOf(sheet.rows[1])).toBe(error);
@@ -299,8 +361,12 @@ describe("keyseats", () => {
 
   it("the member must be known", () => {
     const plain = { id: "S", callout: "1.125 +.000/-.001" };
-    expect(errorOf(sheetOf([plain, { id: "K", keyseat: seat({}) }]).rows[1])).toBe("KEYSEAT_ON_UNKNOWN features.1.keyseat.member");
-    expect(limitsText(sheetOf([plain, { id: "K", keyseat: seat({ member: "hub" }) }]).rows[1])[0]).toBe("T 1.251 in 1.241 in");
+    expect(errorOf(sheetOf([plain, { id: "K", keyseat: seat({}) }]).rows[1])).toBe(
+      "KEYSEAT_ON_UNKNOWN features.1.keyseat.member",
+    );
+    expect(limitsText(sheetOf([plain, { id: "K", keyseat: seat({ member: "hub" }) }]).rows[1])[0]).toBe(
+      "T 1.251 in 1.241 in",
+    );
   });
 });
 
@@ -311,15 +377,29 @@ describe("finish and process", () => {
     sheetOf([{ ...seat, ...feature }], finish === undefined ? {} : { titleBlock: { ...drawing.titleBlock, finish } });
 
   it("of the feature, or all over except as noted", () => {
-    const rows = sheetOf([{ ...seat, finish: "Ra 16" }, { id: "T", callout: "2.063" }, { id: "R", callout: "(2.1)" }], {
-      titleBlock: { ...drawing.titleBlock, finish: "Ra 125" },
-    }).rows;
-    const text = rows.map((row) => (row.ok ? `${row.surface?.finish?.value.toString() ?? "-"} ${row.surface?.from ?? "-"}` : ""));
+    const rows = sheetOf(
+      [
+        { ...seat, finish: "Ra 16" },
+        { id: "T", callout: "2.063" },
+        { id: "R", callout: "(2.1)" },
+      ],
+      {
+        titleBlock: { ...drawing.titleBlock, finish: "Ra 125" },
+      },
+    ).rows;
+    const text = rows.map((row) =>
+      row.ok ? `${row.surface?.finish?.value.toString() ?? "-"} ${row.surface?.from ?? "-"}` : "",
+    );
     expect(text).toEqual(["16 µin feature", "125 µin title block", "- -"]);
   });
 
   it("a bare number is in µin on an inch drawing, in µm on a metric one", () => {
-    const metric = resolveSheet({ drawing: "d", unit: "mm", features: [{ ...seat, finish: "Ra 0,8" }], decimalMark: "," });
+    const metric = resolveSheet({
+      drawing: "d",
+      unit: "mm",
+      features: [{ ...seat, finish: "Ra 0,8" }],
+      decimalMark: ",",
+    });
     const [row] = metric.rows;
     expect(row?.ok === true && row.surface?.finish?.value.toString()).toBe("0.8 µm");
   });
@@ -334,7 +414,9 @@ describe("finish and process", () => {
   it("finish too coarse for the tolerance, for the function; process that does not reach", () => {
     // k6 on 28 is 13 µm wide; Ra 125 µin is 3.2 µm
     expect(codes(withFinish({}, "Ra 125"))).toEqual(["FINISH_TOO_COARSE_FOR_TOLERANCE"]);
-    expect(codes(withFinish({ finish: "Ra 125", function: "bearing seat" }))).toContain("FINISH_TOO_COARSE_FOR_FUNCTION");
+    expect(codes(withFinish({ finish: "Ra 125", function: "bearing seat" }))).toContain(
+      "FINISH_TOO_COARSE_FOR_FUNCTION",
+    );
     expect(codes(withFinish({ finish: "Ra 16", process: "drilling" }))).toEqual(
       expect.arrayContaining(["PROCESS_DOES_NOT_REACH_FINISH", "PROCESS_DOES_NOT_REACH_GRADE"]),
     );

@@ -106,7 +106,12 @@ describe("the two styles", () => {
 });
 
 describe("reading back", () => {
-  const styles: readonly CalloutStyle[] = [INCH, METRIC, { ...INCH, decimalMark: "," }, { ...METRIC, decimalMark: "," }];
+  const styles: readonly CalloutStyle[] = [
+    INCH,
+    METRIC,
+    { ...INCH, decimalMark: "," },
+    { ...METRIC, decimalMark: "," },
+  ];
 
   it.each<[string, CalloutOptions]>([
     ["7 3/8 ±1/64", inch],
@@ -202,6 +207,8 @@ describe("writeCallout refuses", () => {
   ])("%s", (_name, request) => {
     const code = attempt(() => writeCallout(request as CalloutRequest, INCH));
     // a value inside a request can be refused for what it is; a text made of it never comes out
-    expect(code.ok ? code.value : code.error.code).toMatch(/^(?:CALLOUT_NOT_UNDERSTOOD|LIMITS_UPSIDE_DOWN|LENGTH_INVALID|CLASS_MALFORMED|FIT_MALFORMED)$/);
+    expect(code.ok ? code.value : code.error.code).toMatch(
+      /^(?:CALLOUT_NOT_UNDERSTOOD|LIMITS_UPSIDE_DOWN|LENGTH_INVALID|CLASS_MALFORMED|FIT_MALFORMED)$/,
+    );
   });
 });

@@ -1,5 +1,6 @@
 // Preferred roughness values. µm: ISO 468:1982, series R10 of ISO 3 (3.15, 31.5, 0.0125 written 3.2, 32, 0.012).
-// Pairs: recommended Ra values of ASME B46.1 as a handbook lists them, from memory; 3, 6 and 600 µin are no R10 values.
+// Pairs: recommended Ra values of ASME B46.1 as a handbook lists them, from memory, without those that are a roughness
+// grade's (N0 to N11: see roughnessGrades.ts); 3, 6 and 600 µin are no R10 values.
 // Rz: ISO 468:1982, first choice, from memory.
 
 /** Ra in µm, finest first. */
@@ -10,37 +11,25 @@ export const R10_SERIES_UM: readonly number[] = [
   32, 40, 50, 63, 80, 100,
 ];
 
-/** Ra pairs of the inch series, finest first. */
-export const ASME_SERIES: readonly { readonly um: number; readonly uin: number }[] = [
-  { um: 0.012, uin: 0.5 },
-  { um: 0.025, uin: 1 },
-  { um: 0.05, uin: 2 },
+/** Second-choice Ra pairs of the inch series, finest first. */
+export const ASME_SECOND_CHOICE: readonly { readonly um: number; readonly uin: number }[] = [
   { um: 0.075, uin: 3 },
-  { um: 0.1, uin: 4 },
   { um: 0.125, uin: 5 },
   { um: 0.15, uin: 6 },
-  { um: 0.2, uin: 8 },
   { um: 0.25, uin: 10 },
   { um: 0.32, uin: 13 },
-  { um: 0.4, uin: 16 },
   { um: 0.5, uin: 20 },
   { um: 0.63, uin: 25 },
-  { um: 0.8, uin: 32 },
   { um: 1, uin: 40 },
   { um: 1.25, uin: 50 },
-  { um: 1.6, uin: 63 },
   { um: 2, uin: 80 },
   { um: 2.5, uin: 100 },
-  { um: 3.2, uin: 125 },
   { um: 4, uin: 160 },
   { um: 5, uin: 200 },
-  { um: 6.3, uin: 250 },
   { um: 8, uin: 320 },
   { um: 10, uin: 400 },
-  { um: 12.5, uin: 500 },
   { um: 15, uin: 600 },
   { um: 20, uin: 800 },
-  { um: 25, uin: 1000 },
 ];
 
 /** Rz in µm, finest first. */
