@@ -1,6 +1,6 @@
-import { LimitsError, attempt } from "../errors.js";
+import { attempt } from "../errors.js";
 import type { LimitsProblem } from "../errors.js";
-import { finishForFunction, processNames, roughness } from "../finish/index.js";
+import { finishForFunction, processGrades, roughness } from "../finish/index.js";
 import type { Roughness } from "../finish/index.js";
 import { atPath } from "../located.js";
 import type { DecimalMark, LengthUnit } from "../units/index.js";
@@ -38,22 +38,11 @@ export function surfaceOf(
   };
   const { finish: text, process, function: use } = spec;
   const own = text === undefined ? null : read("finish", () => readFinish(text, context));
-  const knownProcess = process === undefined ? null : read("process", () => knownProcessName(process));
+  const knownProcess = process === undefined ? null : read("process", () => processGrades(process).process);
   const knownUse = use === undefined ? null : read("function", () => finishForFunction(use).function);
   // a finish that cannot be read is not replaced by that of the title block
   const finish = text === undefined ? context.allOver : own;
   if (finish === null && knownProcess === null && knownUse === null) return null;
   const from = finish === null ? null : own === null ? "title block" : "feature";
   return Object.freeze({ finish, from, process: knownProcess, function: knownUse });
-}
-
-function knownProcessName(process: string): string {
-  const wanted = process.trim().toLowerCase();
-  const processes = processNames();
-  const found = processes.find(({ name, also }) => name === wanted || also.includes(wanted));
-  if (found !== undefined) return found.name;
-  throw new LimitsError("PROCESS_UNKNOWN", "the charts here do not know this process", {
-    value: process,
-    allowed: processes.map(({ name }) => name).join(", "),
-  });
 }

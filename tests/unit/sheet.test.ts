@@ -121,6 +121,29 @@ describe("resolveSheet", () => {
     expect(sheet.problems).toEqual([]);
   });
 
+  it("the title block by standard, and lines of its own before it", () => {
+    const sheet = resolveSheet({
+      drawing: "d",
+      unit: "mm",
+      titleBlock: { general: "ISO 2768-mK", decimals: { "2": "±0.05" } },
+      features: [
+        { id: "1", callout: "28" },
+        { id: "2", callout: "28.00" },
+        { id: "3", callout: "M8" },
+        { id: "4", callout: "(28)" },
+      ],
+    });
+    const limits = sheet.rows.map((row) =>
+      row.ok && row.resolved.outcome === "limits" ? row.resolved.limits.max.toString() : "-",
+    );
+    // ISO 2768-1:1989, Table 1, class m, over 6 to 30 mm: ±0.2
+    expect(limits).toEqual(["28.2 mm", "28.05 mm", "-", "-"]);
+    expect(sheet.counts).toMatchObject({ limits: 2, withoutLimits: 2, failed: 0 });
+    expect(
+      errorOf(sheetOf([{ id: "1", callout: "2.063" }], { titleBlock: { general: "ISO 2768-x" } }).rows[0]),
+    ).toMatch(/^GENERAL_TOLERANCE_UNKNOWN titleBlock/);
+  });
+
   it("decimal comma", () => {
     const sheet = resolveSheet({
       drawing: "d",
@@ -192,6 +215,14 @@ describe("mates", () => {
       "-15 µm",
     ]);
     expect(counts).toMatchObject({ fits: 1, fitsFailed: 0 });
+  });
+
+  it("a fit class that both callouts name is the fit, with all that it says", () => {
+    const sheet = sheetOf([
+      { id: "S", callout: "⌀1.6875 LN3", kind: "shaft", mate: "B" },
+      { id: "B", callout: "⌀1.6875 LN3", kind: "hole" },
+    ]);
+    expect(sheet.fits).toMatchObject([{ ok: true, fit: { designation: "LN3", kind: "interference" } }]);
   });
 
   it("limit dimensions have no nominal to differ", () => {
@@ -424,6 +455,13 @@ describe("finish and process", () => {
     const [finding] = withFinish({}, "Ra 125").findings;
     expect(finding).toMatchObject({ severity: "warning", features: ["S"] });
     expect(finding?.settle).not.toBe("");
+  });
+
+  it("a process goes by any of its trade names", () => {
+    const sheet = withFinish({ finish: "Ra 63", process: "EDM" });
+    expect(sheet.problems).toEqual([]);
+    const [row] = sheet.rows;
+    expect(row?.ok === true && row.surface?.process).toBe("electro-discharge machining");
   });
 
   it("what cannot be read is a problem with its path, and costs no limits", () => {
