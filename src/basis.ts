@@ -2,7 +2,7 @@
 export type BasisHow = "tabulated" | "derived" | "common practice" | "caller";
 
 /**
- * How sure the transcription of a tabulated value is: how many published tables it was read in, whether
+ * How sure a tabulated value is: how many published tables it was read in, whether
  * the standard's formula confirms it, or whether it is only remembered.
  */
 export type Mark = "two-sources" | "one-source+formula" | "one-source" | "formula" | "memory" | "conflict";

@@ -1,11 +1,12 @@
 import { LimitsError } from "../errors.js";
 import { markOf } from "../basis.js";
-import type { Basis, Mark } from "../basis.js";
-import { limitsFromMaxMin, makeLimits } from "../limits/index.js";
+import type { Mark } from "../basis.js";
+import { limitsFromMaxMin } from "../limits/index.js";
 import type { Limits } from "../limits/index.js";
 import { thou } from "../units/index.js";
 import { decodeWoodruffNumber } from "./decodeWoodruffNumber.js";
-import { B17_2, deviationsText, keyStep } from "./keyStep.js";
+import { tolerancedInch } from "./tolerancedInch.js";
+import { B17_2, keyStep } from "./keyStep.js";
 import { tableInch } from "./tableLength.js";
 import { WOODRUFF_KEY_DEVIATIONS, WOODRUFF_KEYS } from "./tables/woodruffKeys.js";
 import type { WoodruffKeyRow } from "./tables/woodruffKeys.js";
@@ -33,14 +34,14 @@ export function woodruffKey(number: string): WoodruffKey {
   // keys over 1 1/2 in diameter are remembered but for a few cells
   const marked = marks.split("").map((sign) => markOf(sign));
   const [markC = "memory", markF = "memory", markD = "memory", markE = "memory"] = marked;
-  const widthLimits = toleranced(no, "width W", w, width, markC);
+  const widthLimits = tolerancedInch(`Woodruff keys, ${no}`, "width W", w, width, markC);
   const fullRadius = heightLimits(no, "C", cMax, cMin, markC);
   return Object.freeze({
     standard: B17_2,
     number: no,
     width: widthLimits,
-    diameter: toleranced(no, "diameter B", b, diameter, markC),
-    length: toleranced(no, "length F", f, length, markF),
+    diameter: tolerancedInch(`Woodruff keys, ${no}`, "diameter B", b, diameter, markC),
+    length: tolerancedInch(`Woodruff keys, ${no}`, "length F", f, length, markF),
     fullRadius,
     // D min is remembered in every row
     flatBottom: heightLimits(no, "D", dMax, dMin, "memory"),
@@ -69,19 +70,6 @@ export function listedRow<Row extends readonly [string, ...unknown[]]>(rows: rea
         ? "keys 202 (1/16 x 1/4 in) to 2428 (3/4 x 3 1/2 in)"
         : `of this diameter: ${sameDiameter.map(([listed]) => listed).join(", ")}`,
   });
-}
-
-function toleranced(
-  no: string,
-  what: string,
-  nominal: string,
-  deviations: { readonly upper: number; readonly lower: number },
-  mark: Mark,
-): Limits {
-  const { upper, lower } = deviations;
-  const says = `${what} ${nominal} in ${deviationsText(upper, lower)}`;
-  const basis: Basis = Object.freeze([keyStep(B17_2, `Woodruff keys, ${no}`, says, "tabulated", mark)]);
-  return makeLimits(tableInch(nominal), thou(upper), thou(lower), basis, null);
 }
 
 function heightLimits(no: string, what: "C" | "D", max: WoodruffKeyRow[4], min: string, mark: Mark): Limits {

@@ -1,15 +1,16 @@
 import { LimitsError } from "../errors.js";
 import { markOf } from "../basis.js";
-import type { Basis, Mark } from "../basis.js";
+import type { Basis } from "../basis.js";
 import { limitsFromMaxMin, makeLimits } from "../limits/index.js";
 import type { Limits } from "../limits/index.js";
 import { ownValue } from "../ownValue.js";
-import { lengthOfTicks, multiply, thou } from "../units/index.js";
+import { lengthOfTicks, multiply } from "../units/index.js";
 import type { Length, LengthLike } from "../units/index.js";
 import { chordTicks } from "./crown.js";
 import { decodeWoodruffNumber } from "./decodeWoodruffNumber.js";
 import { DOUBTFUL } from "./keyCautions.js";
-import { B17_2, deviationsText, keyStep } from "./keyStep.js";
+import { tolerancedInch } from "./tolerancedInch.js";
+import { B17_2, keyStep } from "./keyStep.js";
 import { positiveLength } from "./positiveLength.js";
 import { tableInch } from "./tableLength.js";
 import { WOODRUFF_KEYSEAT_DEVIATIONS, WOODRUFF_KEYSEATS } from "./tables/woodruffKeyseats.js";
@@ -53,9 +54,15 @@ export function woodruffKeyseat(number: string, options?: WoodruffKeyseatOptions
   const deviations = WOODRUFF_KEYSEAT_DEVIATIONS;
   const keyWidth = decodeWoodruffNumber(no).width;
   const shaftWidth = fromMaxMin(no, "shaft width", wMax, wMin, keyWidth);
-  const shaftDepth = toleranced(no, "shaft depth", depth, deviations.shaftDepth, markOf(marks[0]));
-  const hubWidthLimits = toleranced(no, "hub width", hubWidth, deviations.hubWidth, "memory");
-  const hubDepthLimits = toleranced(no, "hub depth", hubDepth, deviations.hubDepth, markOf(marks[1]));
+  const shaftDepth = tolerancedInch(`keyseats, ${no}`, "shaft depth", depth, deviations.shaftDepth, markOf(marks[0]));
+  const hubWidthLimits = tolerancedInch(`keyseats, ${no}`, "hub width", hubWidth, deviations.hubWidth, "memory");
+  const hubDepthLimits = tolerancedInch(
+    `keyseats, ${no}`,
+    "hub depth",
+    hubDepth,
+    deviations.hubDepth,
+    markOf(marks[1]),
+  );
   return Object.freeze({
     standard: B17_2,
     number: no,
@@ -70,7 +77,7 @@ export function woodruffKeyseat(number: string, options?: WoodruffKeyseatOptions
       sideDepth: hubDepthLimits,
       control: diameter === null ? null : hubControl(diameter, keyWidth, hubDepthLimits),
     }),
-    keyAboveShaft: toleranced(no, "key above shaft", above, deviations.keyAboveShaft, "memory"),
+    keyAboveShaft: tolerancedInch(`keyseats, ${no}`, "key above shaft", above, deviations.keyAboveShaft, "memory"),
     basis: Object.freeze([
       keyStep(
         B17_2,
@@ -82,19 +89,6 @@ export function woodruffKeyseat(number: string, options?: WoodruffKeyseatOptions
     ]),
     cautions: Object.freeze([DOUBTFUL]),
   });
-}
-
-function toleranced(
-  no: string,
-  what: string,
-  nominal: string,
-  deviations: { readonly upper: number; readonly lower: number },
-  mark: Mark,
-): Limits {
-  const { upper, lower } = deviations;
-  const says = `${what} ${nominal} in ${deviationsText(upper, lower)}`;
-  const basis: Basis = Object.freeze([keyStep(B17_2, `keyseats, ${no}`, says, "tabulated", mark)]);
-  return makeLimits(tableInch(nominal), thou(upper), thou(lower), basis, null);
 }
 
 function fromMaxMin(no: string, what: string, max: string, min: string, nominal: Length): Limits {

@@ -26,8 +26,7 @@ export function resolveKeyseat(
     });
   }
   const member = fields.member ?? memberOf(row);
-  // the fields are strings and numbers; the function behind checks each and refuses by code
-  const seat = keyseatRows(limits.nominal, { ...spec, member } as unknown as KeyseatSpec);
+  const seat = keyseatRows(limits.nominal, asSpec({ ...spec, member }));
   const print = (name: "control" | "width"): Limits | null => {
     const text = printed[name];
     return text === undefined ? null : atPath(["printed", name], () => limitsOfText(text, context));
@@ -38,6 +37,11 @@ export function resolveKeyseat(
     seat,
     printed: Object.freeze({ control: print("control"), width: print("width") }),
   });
+}
+
+/** The fields of a file are any texts and numbers; the function behind checks each and refuses by code. */
+function asSpec(fields: object): KeyseatSpec {
+  return fields as KeyseatSpec;
 }
 
 /** Findings of a keyseat: printed limits that are not the standard's. */
