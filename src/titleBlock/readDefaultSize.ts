@@ -24,6 +24,7 @@ interface RequestFields {
   readonly nominal?: unknown;
   readonly shape?: unknown;
   readonly angle?: unknown;
+  readonly deviations?: unknown;
 }
 
 const OWN_TOLERANCE = "a size with a tolerance of its own takes no default tolerance";
@@ -46,6 +47,7 @@ const KINDS_WITHOUT_DEFAULT: ReadonlyMap<string, string> = new Map([
   ["basic", "a basic dimension takes no default tolerance"],
   ["single limit", "a single limit takes no default tolerance"],
   ["thread", "a thread is governed by its own standard"],
+  ["chamfer", "a chamfer is a length and an angle, and each takes its own default"],
 ]);
 
 /** Reads what wants a default; what takes none is refused with the reason. */
@@ -54,10 +56,11 @@ export function readDefaultSize(block: TitleBlock, size: DefaultSizeLike): Defau
   if (typeof given === "string") return ofText(block, given);
   if (typeof given === "object" && given !== null) {
     if (hasOwn(given, "microarcseconds")) return { kind: "angle", angle: given as AngleData };
+    // a request with deviations has a form too
+    if (hasOwn(given, "kind")) return ofRequest(given);
     if (hasOwn(given, "form")) {
       return { kind: "length", written: given as WrittenDimensionLike, mark: null };
     }
-    if (hasOwn(given, "kind")) return ofRequest(given);
   }
   throw notApplicable("a default goes by how the size was written", given, "its text, or what a reader made of it");
 }
@@ -83,6 +86,7 @@ function ofRequest(request: RequestFields): DefaultSize {
   if (kind === "plain" && isObject(nominal)) {
     return { kind: "length", written: nominal as WrittenDimensionLike, mark: markOfShape(ownValue(request, "shape")) };
   }
+  if (isObject(ownValue(request, "deviations"))) throw notApplicable(OWN_TOLERANCE, kind);
   if (kind === "angle" && isObject(angle)) return { kind: "angle", angle: angle as AngleData };
   const why =
     typeof kind === "string" && kind !== "plain" && kind !== "angle"
