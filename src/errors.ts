@@ -98,7 +98,8 @@ export type ErrorCode =
   | "MATE_UNKNOWN"
   | "MATE_KIND_INVALID"
   | "MATE_UNRESOLVED"
-  | "KEYSEAT_ON_UNKNOWN";
+  | "KEYSEAT_ON_UNKNOWN"
+  | "READING_NOT_JUDGED";
 
 /** Where in a text something stood: character offsets, `end` excluded. */
 export interface TextSpan {

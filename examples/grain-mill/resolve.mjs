@@ -1,7 +1,7 @@
 // Resolves a drawing file and prints its limits in both units: `npm start`, or `npm start -- path/to/drawing.json`.
 import { readFile } from "node:fs/promises";
 import { fileURLToPath } from "node:url";
-import { writeLength, writeLimits } from "limitsmith";
+import { attempt, convertLimits, writeLength, writeLimits } from "limitsmith";
 import { resolveSheet } from "limitsmith/sheet";
 
 const EXIT_ROW_FAILED = 1;
@@ -28,10 +28,14 @@ async function readDrawing(path) {
   }
 }
 
-/** Max and min in one unit; a star marks limits that were rounded inside. */
-function bothLimits(limits, unit, places) {
-  const written = writeLimits(limits, { form: "limits", unit, places, numbers: unit === "mm" ? "metric" : "inch" });
-  return written.exact ? written.text : `${written.text} *`;
+/** Max and min in one unit; in the other system rounded inside (method B), which a star marks. */
+function bothLimits(limits, unit) {
+  const converted = attempt(() => convertLimits(limits, unit, { method: "B" }));
+  // the rule of conversion has no fineness for very wide tolerances
+  if (!converted.ok) return writeLimits(limits, { form: "limits", unit, places: unit === "in" ? 2 : 1 }).text;
+  const { maxShift, minShift } = converted.value;
+  const { text } = writeLimits(converted.value.limits, { form: "limits", unit });
+  return maxShift.ticks === 0 && minShift.ticks === 0 ? text : `${text} *`;
 }
 
 function deviations({ upperDeviation, lowerDeviation }) {
@@ -68,8 +72,8 @@ function keyseatLines([id, name], seat) {
           symbol,
           "-",
           deviations(limits),
-          bothLimits(limits, "in", 4),
-          bothLimits(limits, "mm", 3),
+          bothLimits(limits, "in"),
+          bothLimits(limits, "mm"),
           "",
           seat.standard,
         ],
@@ -84,8 +88,8 @@ function cells(head, resolved) {
         ...head,
         limits.designation ?? "-",
         deviations(limits),
-        bothLimits(limits, "in", 4),
-        bothLimits(limits, "mm", 3),
+        bothLimits(limits, "in"),
+        bothLimits(limits, "mm"),
         source(limits.basis),
       ];
     }
@@ -102,8 +106,8 @@ function cells(head, resolved) {
         ...head,
         "-",
         deviations(limits),
-        `${bothLimits(limits, "in", 4)}  ${angles}`,
-        bothLimits(limits, "mm", 3),
+        `${bothLimits(limits, "in")}  ${angles}`,
+        bothLimits(limits, "mm"),
         source(limits.basis),
       ];
     }

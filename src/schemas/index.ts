@@ -2,6 +2,7 @@ export { sheetJsonSchema, sheetSchema } from "../sheet/index.js";
 export type {
   FeatureBase,
   FeatureSpec,
+  InspectionFields,
   KeyseatFeatureSpec,
   KeyseatFields,
   SheetSpec,

@@ -46,6 +46,7 @@ function build(): Schemas {
     finish: optional(LONGEST_ID, "Roughness of its surface, such as Ra 32 in µin or µm by the drawing's unit"),
     process: optional(LONGEST_ID, "Trade name of the last process"),
     function: optional(LONGEST_ID, "What the surface is for, such as bearing seat"),
+    measured: optional(LONGEST_ID, "What was measured; judged by the rule of inspection"),
   });
   const keyseat = z.strictObject({
     ...base,
@@ -97,12 +98,20 @@ function build(): Schemas {
     edges: optional(LONGEST_TEXT, "Edges without an indication of their own"),
     projection: z.exactOptional(described(z.enum(["first angle", "third angle"]), "Noted, not used")),
   });
+  const inspection = z.strictObject({
+    rule: described(
+      z.enum(["simple acceptance", "ISO 14253-1:2013", "ISO 14253-1:2017"]),
+      "The decision rule, by its name",
+    ),
+    uncertainty: optional(LONGEST_ID, "Expanded uncertainty U (k = 2), for rules with a guard band"),
+  });
   const frameFields = {
     drawing: text(LONGEST_TEXT, "Title of the drawing"),
     unit: unit("Unit of all numbers that stand without one"),
     decimalMark: z.exactOptional(described(z.enum([".", ","]), "The decimal mark; a point where it is not given")),
     note: z.exactOptional(text(LONGEST_TEXT, "Anything to remember; not read")),
     titleBlock: z.exactOptional(described(titleBlock, "Default tolerances of the drawing")),
+    inspection: z.exactOptional(described(inspection, "How readings are judged")),
   };
   return {
     size,

@@ -4,6 +4,7 @@ export { sheetSchema } from "./sheetSchema.js";
 export type {
   FeatureBase,
   FeatureSpec,
+  InspectionFields,
   KeyseatFeatureSpec,
   KeyseatFields,
   SheetSpec,

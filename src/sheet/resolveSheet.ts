@@ -8,6 +8,8 @@ import { titleBlock } from "../titleBlock/index.js";
 import { countSheet } from "./countSheet.js";
 import { ownCopy } from "./ownCopy.js";
 import { findingsOfSurface } from "./findingsOfSurface.js";
+import { judgementOf } from "./judgementOf.js";
+import type { InspectionContext } from "./judgementOf.js";
 import { readFeature, readFrame } from "./readFrame.js";
 import type { DataPath, SheetFrame } from "./readFrame.js";
 import type { ReadRow } from "./readRow.js";
@@ -88,6 +90,7 @@ export function resolveSheet(json: unknown): ResolvedSheet {
 interface SheetContext {
   readonly callouts: CalloutContext;
   readonly finishes: FinishContext;
+  readonly inspection: InspectionContext;
   /** Why the title block cannot be used; `null` where it can, or there is none. */
   readonly blockError: LimitsProblem | null;
 }
@@ -106,6 +109,7 @@ function sheetContext(frame: SheetFrame, problems: LimitsProblem[]): SheetContex
   const used = block.ok ? block.value : null;
   return {
     callouts: { unit, decimalMark, ...(used === null ? {} : { titleBlock: used }) },
+    inspection: { unit, decimalMark, inspection: frame.inspection ?? null },
     finishes: { unit, decimalMark, allOver: allOver.ok ? allOver.value : null },
     blockError: block.ok ? null : block.error,
   };
@@ -144,7 +148,10 @@ function rowOf(
   const surface = surfaceOf(spec, index, finishes, problems);
   if (resolved.ok) {
     const { value } = resolved;
-    return Object.freeze({ ...base, kind: base.kind ?? kindOf(value), ok: true as const, resolved: value, surface });
+    const limits = value.outcome === "limits" ? value.limits : null;
+    const judgement = judgementOf(spec, index, limits, sheet.inspection, problems);
+    const kind = base.kind ?? kindOf(value);
+    return Object.freeze({ ...base, kind, ok: true as const, resolved: value, surface, judgement });
   }
   // the size would have fallen to the block: its fault is the row's fault
   const missing = resolved.error.code === "TITLE_BLOCK_MISSING" && sheet.blockError !== null;
@@ -165,7 +172,7 @@ function withKeyseats(read: readonly ReadRow[], callouts: CalloutContext): reado
     );
     const base = baseOf({ ...spec, id }, row.index);
     return done.ok
-      ? Object.freeze({ ...base, ok: true as const, resolved: done.value, surface: null })
+      ? Object.freeze({ ...base, ok: true as const, resolved: done.value, surface: null, judgement: null })
       : Object.freeze({ ...base, ok: false as const, error: done.error });
   });
 }

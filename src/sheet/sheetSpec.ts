@@ -1,3 +1,5 @@
+import type { DecisionRule } from "../limits/index.js";
+
 /** What every feature of a drawing file has. */
 export interface FeatureBase {
   /** Name within the drawing, such as a balloon number; each one once. */
@@ -22,6 +24,8 @@ export interface SizeFeatureSpec extends FeatureBase {
   readonly process?: string;
   /** What the surface is for, such as `"bearing seat"`. */
   readonly function?: string;
+  /** What was measured, in the unit of the drawing unless it says its own; judged by the rule of `inspection`. */
+  readonly measured?: string;
 }
 
 /** A keyseat of a drawing, as a drawing file holds it. */
@@ -93,6 +97,14 @@ export interface TitleBlockFields extends TitleBlockLineFields {
   readonly projection?: "first angle" | "third angle";
 }
 
+/** How readings are judged, as a drawing file holds it. */
+export interface InspectionFields {
+  /** The decision rule, by its name. */
+  readonly rule: DecisionRule;
+  /** Expanded uncertainty U (k = 2), in the unit of the drawing unless it says its own; for rules with a guard band. */
+  readonly uncertainty?: string;
+}
+
 /** A drawing, as a drawing file holds it. */
 export interface SheetSpec {
   /** Title of the drawing. */
@@ -105,6 +117,8 @@ export interface SheetSpec {
   readonly note?: string;
   /** Default tolerances of the drawing. */
   readonly titleBlock?: TitleBlockFields;
+  /** How readings are judged; needed where a feature says what was measured. */
+  readonly inspection?: InspectionFields;
   /** The features, in the order of the drawing. */
   readonly features: readonly FeatureSpec[];
 }

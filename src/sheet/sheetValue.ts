@@ -2,7 +2,7 @@ import type { ResolvedCallout } from "../callout/index.js";
 import type { LimitsProblem } from "../errors.js";
 import type { Roughness } from "../finish/index.js";
 import type { KeyseatRows } from "../keys/index.js";
-import type { Fit, Limits } from "../limits/index.js";
+import type { Fit, Judgement, Limits } from "../limits/index.js";
 import type { LengthUnit } from "../units/index.js";
 
 /** A keyseat worked out: its control dimension and width by the standard, and what the drawing prints. */
@@ -50,6 +50,8 @@ export type SheetRow =
       readonly resolved: ResolvedCallout | ResolvedKeyseat;
       /** `null` where nothing is said of it. */
       readonly surface: SheetSurface | null;
+      /** The reading judged against the limits; `null` where nothing was measured. */
+      readonly judgement: Judgement | null;
     })
   | (SheetRowBase & { readonly ok: false; readonly error: LimitsProblem });
 
@@ -114,7 +116,7 @@ export interface ResolvedSheet {
   readonly fits: readonly SheetFit[];
   /** What a checker would mark, in the order of the rows. */
   readonly findings: readonly SheetFinding[];
-  /** Errors that cost no row its limits: in the title block, or in what is said of a finish. */
+  /** Errors that cost no row its limits: in the title block, in what is said of a finish, in a reading. */
   readonly problems: readonly LimitsProblem[];
   /** Keys of the file that mean nothing here, as paths; they were passed over. */
   readonly unknownKeys: readonly (readonly (string | number)[])[];

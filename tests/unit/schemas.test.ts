@@ -23,6 +23,7 @@ const drawings: [string, boolean, unknown][] = [
     {
       ...drawing,
       decimalMark: ",",
+      inspection: { rule: "ISO 14253-1:2017", uncertainty: "0,002" },
       note: "n",
       titleBlock: { unit: "mm", decimals: { "1": "±0,2" }, angles: "±1°" },
       features: [

@@ -475,3 +475,46 @@ describe("finish and process", () => {
     expect(sheet.counts).toMatchObject({ limits: 1, failed: 0 });
   });
 });
+
+describe("readings", () => {
+  // ISO 286-2:2010, 17 h6: 0/-11 µm
+  const measured = (reading: string, inspection?: object): ResolvedSheet =>
+    resolveSheet({
+      drawing: "d",
+      unit: "mm",
+      ...(inspection === undefined ? {} : { inspection }),
+      features: [{ id: "A", callout: "⌀17 h6", measured: reading }],
+    });
+  const verdict = (sheet: ResolvedSheet): string | null => {
+    const [row] = sheet.rows;
+    return row?.ok === true ? (row.judgement?.verdict ?? null) : null;
+  };
+
+  it("are judged by the rule of the file, unrounded", () => {
+    const simple = { rule: "simple acceptance" };
+    expect(verdict(measured("16.989", simple))).toBe("pass");
+    expect(verdict(measured("16.9889", simple))).toBe("fail");
+    expect(verdict(measured("0.669 in", simple))).toBe("pass");
+    const guarded = { rule: "ISO 14253-1:2013", uncertainty: "2 µm" };
+    expect(["16.990", "16.995", "16.980"].map((one) => verdict(measured(one, guarded)))).toEqual([
+      "not proven",
+      "pass",
+      "fail",
+    ]);
+  });
+
+  it("what cannot be judged is a problem with its path, and costs no limits", () => {
+    const cases: [ResolvedSheet, string][] = [
+      [measured("16.99"), "READING_NOT_JUDGED"],
+      [measured("about 17", { rule: "simple acceptance" }), "UNIT_UNKNOWN"],
+      [measured("16.99", { rule: "ISO 14253-1:2013" }), "OPTION_INVALID"],
+    ];
+    for (const [sheet, code] of cases) {
+      expect(sheet.problems.map((one) => [one.code, one.path.slice(0, 3)])).toEqual([
+        [code, ["features", 0, "measured"]],
+      ]);
+      expect(sheet.counts).toMatchObject({ limits: 1, failed: 0 });
+      expect(verdict(sheet)).toBeNull();
+    }
+  });
+});
