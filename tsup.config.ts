@@ -62,7 +62,6 @@ export default defineConfig({
   // through rollup, because the other way of splitting CJS rewrites `?.` and `??` into slow helpers;
   // nothing is imported for its side effects alone, so a room does not load a chunk that it does not use
   treeshake: { moduleSideEffects: false },
-  minifyWhitespace: true,
   clean: true,
   silent: true,
   onSuccess: () => {

@@ -31,8 +31,8 @@ async function readDrawing(path) {
 /** Max and min in one unit; in the other system rounded inside (method B), which a star marks. */
 function bothLimits(limits, unit) {
   const converted = attempt(() => convertLimits(limits, unit, { method: "B" }));
-  // the rule of conversion has no fineness for very wide tolerances
-  if (!converted.ok) return writeLimits(limits, { form: "limits", unit, places: unit === "in" ? 2 : 1 }).text;
+  // the rule of conversion has no fineness for very wide and very narrow tolerances
+  if (!converted.ok) return "no rule of rounding";
   const { maxShift, minShift } = converted.value;
   const { text } = writeLimits(converted.value.limits, { form: "limits", unit });
   return maxShift.ticks === 0 && minShift.ticks === 0 ? text : `${text} *`;

@@ -55,6 +55,18 @@ describe("examples/grain-mill", () => {
     expect(stdout).toContain("3 features, 2 failed");
   });
 
+  it("prints sizes that the rule of conversion does not cover", () => {
+    const features = [
+      { id: "wide", callout: "20 ±2" },
+      { id: "narrow", callout: "0.1 mm ±0.00001" },
+    ];
+    const { status, stdout, stderr } = run(fileWith(JSON.stringify({ drawing: "d", unit: "in", features })));
+    expect(stderr).toBe("");
+    expect(status).toBe(0);
+    expect(stdout).toContain("22/18");
+    expect(stdout).toContain("no rule of rounding");
+  });
+
   it.each<[string, () => string, RegExp]>([
     ["a missing file", () => join(folder, "none.json"), /^cannot read .*: there is no such file$/],
     ["a folder", () => folder, /^cannot read .*/],
