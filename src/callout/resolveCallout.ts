@@ -1,3 +1,4 @@
+import type { Caution } from "../basis.js";
 import { LimitsError } from "../errors.js";
 import { inchFit } from "../inchFits/index.js";
 import { isoFit, isoLimits, parseToleranceClass } from "../iso286/index.js";
@@ -5,12 +6,12 @@ import { angleLimits, limits, limitsFromMaxMin, singleLimit } from "../limits/in
 import type { AngleLimits, Fit, Limits, SingleLimit } from "../limits/index.js";
 import { ownValue } from "../ownValue.js";
 import { defaultLimits } from "../titleBlock/index.js";
-import type { TitleBlock, TitleBlockSpec } from "../titleBlock/index.js";
-import type { WrittenDimension } from "../units/index.js";
+import type { DefaultLimitsOptions, SizeFeature, TitleBlock, TitleBlockSpec } from "../titleBlock/index.js";
+import type { Angle, WrittenDimension } from "../units/index.js";
 import { asRequest } from "./asRequest.js";
 import { readCallout } from "./readCallout.js";
 import type { CalloutOptions } from "./readSize.js";
-import type { CalloutRequest } from "./request.js";
+import type { AngleRequest, CalloutRequest, ChamferRequest, PlainRequest } from "./request.js";
 
 /** What is known around a callout. */
 export interface CalloutContext extends CalloutOptions {
@@ -18,6 +19,8 @@ export interface CalloutContext extends CalloutOptions {
   readonly feature?: "hole" | "shaft";
   /** Defaults for sizes that stand alone; its unit counts where `unit` is not given. */
   readonly titleBlock?: TitleBlock | TitleBlockSpec;
+  /** What a default can hang on besides the text: feature, shorter leg of an angle, machined or cast or welded. */
+  readonly defaults?: DefaultLimitsOptions;
 }
 
 /** What every outcome has. */
@@ -26,6 +29,8 @@ interface OutcomeBase {
   readonly request: CalloutRequest;
   /** Limits of the depth, by the title block; `null` where the callout has no depth. */
   readonly depth: Limits | null;
+  /** What to weigh before relying on a default tolerance; empty where none applied. A fit has cautions of its own. */
+  readonly cautions: readonly Caution[];
 }
 
 /** Limits of one size, and the fit that they come from where the callout or its class is one. */
@@ -93,7 +98,8 @@ type BareOutcome<Outcome = ResolvedCallout> = Outcome extends ResolvedCallout
  * Turns a callout into limits, by its class, its own tolerance, or the title block.
  *
  * @param callout - the text, or a request that {@link readCallout} gave
- * @param context - `unit` of the drawing (mm, in …), `decimalMark`, `feature` (hole or shaft), `titleBlock`
+ * @param context - `unit` of the drawing (mm, in …), `decimalMark`, `feature` (hole or shaft), `titleBlock`,
+ *   `defaults` (what a default can hang on besides the text)
  * @returns the frozen outcome: limits in the unit of the size; for a fit on a known feature, the limits of that
  *   member and the fit; reference and basic dimensions and threads have none, with the reason
  * @throws `CALLOUT_KIND_MISMATCH`, `TITLE_BLOCK_MISSING`, and what {@link readCallout}, {@link isoLimits},
@@ -123,14 +129,61 @@ export function resolveCallout(callout: string | CalloutRequest, context: Callou
         })
       : asRequest(callout);
   const { depth } = request;
+  const byBlock = new Defaults(block, ownValue(context, "defaults"), request.text);
+  const outcome = resolve(request, ownValue(context, "feature"), byBlock);
   return Object.freeze({
-    ...resolve(request, ownValue(context, "feature"), block),
+    ...outcome,
     request,
-    depth: depth === null ? null : byBlock(block, request, depth),
+    depth: depth === null ? null : byBlock.ofLength(depth, "length"),
+    cautions: byBlock.cautions,
   });
 }
 
-function resolve(request: CalloutRequest, feature: "hole" | "shaft" | undefined, block: Block): BareOutcome {
+/** Defaults of the title block for one callout, and the cautions that come with them. */
+class Defaults {
+  readonly #block: Block;
+  readonly #options: DefaultLimitsOptions;
+  readonly #text: string;
+  readonly #cautions: Caution[] = [];
+
+  constructor(block: Block, options: DefaultLimitsOptions | undefined, text: string) {
+    this.#block = block;
+    this.#options = options ?? {};
+    this.#text = text;
+  }
+
+  get cautions(): readonly Caution[] {
+    return Object.freeze([...this.#cautions]);
+  }
+
+  ofPlain(request: PlainRequest): Limits {
+    return this.#note(defaultLimits(this.#need(), request, this.#options)).limits;
+  }
+
+  ofLength(size: WrittenDimension, feature: SizeFeature): Limits {
+    return this.#note(defaultLimits(this.#need(), size, { ...this.#options, feature })).limits;
+  }
+
+  ofAngle(angle: Angle): AngleLimits {
+    return this.#note(defaultLimits(this.#need(), angle, this.#options)).limits;
+  }
+
+  #note<Found extends { readonly cautions: readonly Caution[] }>(found: Found): Found {
+    this.#cautions.push(...found.cautions);
+    return found;
+  }
+
+  #need(): TitleBlock | TitleBlockSpec {
+    if (this.#block !== undefined) return this.#block;
+    throw new LimitsError(
+      "TITLE_BLOCK_MISSING",
+      "a size without a tolerance falls to the title block, and there is none",
+      { value: this.#text, allowed: "a title block in the context, or a tolerance in the callout" },
+    );
+  }
+}
+
+function resolve(request: CalloutRequest, feature: "hole" | "shaft" | undefined, byBlock: Defaults): BareOutcome {
   switch (request.kind) {
     case "class":
       refuseOtherKind(request.toleranceClass, feature);
@@ -148,17 +201,16 @@ function resolve(request: CalloutRequest, feature: "hole" | "shaft" | undefined,
       const { max, min } = request;
       return found(limitsFromMaxMin({ max: max.length, min: min.length, basis: drawingStep(request.text) }));
     }
-    case "single limit":
-      return {
-        outcome: "single limit",
-        single: singleLimit(request.side, request.size.length, drawingStep(request.text)),
-      };
+    case "single limit": {
+      const single = singleLimit(request.side, request.size.length, drawingStep(request.text));
+      return { outcome: "single limit", single };
+    }
     case "plain":
-      return found(byBlock(block, request, request.nominal));
+      return found(byBlock.ofPlain(request));
     case "angle":
-      return { outcome: "angle", angle: angleOf(request, block) };
+      return { outcome: "angle", angle: angleOf(request, byBlock) };
     case "chamfer":
-      return { outcome: "chamfer", limits: chamferLength(request, block), angle: angleOf(request, block) };
+      return { outcome: "chamfer", limits: chamferLength(request, byBlock), angle: byBlock.ofAngle(request.angle) };
     case "reference":
       return { outcome: "no limits", reason: "a reference dimension is for information only" };
     case "basic":
@@ -179,34 +231,14 @@ function memberOf(fit: Fit, feature: "hole" | "shaft" | undefined): BareOutcome 
   return feature === undefined ? { outcome: "fit", fit } : { outcome: "limits", limits: fit[feature], fit };
 }
 
-function byBlock(block: Block, request: CalloutRequest, size: WrittenDimension): Limits {
-  return defaultLimits(needBlock(block, request.text), size).limits;
-}
-
-function chamferLength(request: CalloutRequest & { readonly kind: "chamfer" }, block: Block): Limits {
-  const { length, deviations, text } = request;
-  if (deviations === null) return byBlock(block, request, length);
+function chamferLength({ length, deviations, text }: ChamferRequest, byBlock: Defaults): Limits {
+  if (deviations === null) return byBlock.ofLength(length, "external radius or chamfer");
   return limits({ nominal: length.length, ...deviations, basis: drawingStep(text) });
 }
 
-function angleOf(request: CalloutRequest & { readonly kind: "angle" | "chamfer" }, block: Block): AngleLimits {
-  const { angle, text } = request;
-  if (request.kind === "angle" && request.deviations !== null) {
-    return angleLimits({ nominal: angle, ...request.deviations, basis: drawingStep(text) });
-  }
-  return defaultLimits(needBlock(block, text), angle).limits;
-}
-
-function needBlock(block: Block, text: string): TitleBlock | TitleBlockSpec {
-  if (block !== undefined) return block;
-  throw new LimitsError(
-    "TITLE_BLOCK_MISSING",
-    "a size without a tolerance falls to the title block, and there is none",
-    {
-      value: text,
-      allowed: "a title block in the context, or a tolerance in the callout",
-    },
-  );
+function angleOf({ angle, deviations, text }: AngleRequest, byBlock: Defaults): AngleLimits {
+  if (deviations === null) return byBlock.ofAngle(angle);
+  return angleLimits({ nominal: angle, ...deviations, basis: drawingStep(text) });
 }
 
 function refuseOtherKind(toleranceClass: string, feature: "hole" | "shaft" | undefined): void {

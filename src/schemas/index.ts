@@ -1,5 +1,6 @@
 export { sheetJsonSchema, sheetSchema } from "../sheet/index.js";
 export type {
+  DefaultFields,
   FeatureBase,
   FeatureSpec,
   InspectionFields,

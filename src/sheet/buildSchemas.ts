@@ -46,6 +46,26 @@ function build(): Schemas {
     finish: optional(LONGEST_ID, "Roughness of its surface, such as Ra 32 in µin or µm by the drawing's unit"),
     process: optional(LONGEST_ID, "Trade name of the last process"),
     function: optional(LONGEST_ID, "What the surface is for, such as bearing seat"),
+    defaults: z.exactOptional(
+      described(
+        z.strictObject({
+          feature: z.exactOptional(
+            described(
+              z.enum(["size", "diameter", "length", "internal radius", "external radius or chamfer", "wall thickness"]),
+              "What the size belongs to",
+            ),
+          ),
+          shorterLeg: optional(LONGEST_ID, "Length of the shorter leg of an angle, with its unit"),
+          process: z.exactOptional(
+            described(
+              z.enum(["machined", "cast", "welded", "cast to machined", "welded to machined"]),
+              "How its surfaces came about",
+            ),
+          ),
+        }),
+        "What a default tolerance can hang on besides the text",
+      ),
+    ),
     measured: optional(LONGEST_ID, "What was measured; judged by the rule of inspection"),
   });
   const keyseat = z.strictObject({

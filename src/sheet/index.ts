@@ -2,6 +2,7 @@ export { resolveSheet } from "./resolveSheet.js";
 export { sheetJsonSchema } from "./sheetJsonSchema.js";
 export { sheetSchema } from "./sheetSchema.js";
 export type {
+  DefaultFields,
   FeatureBase,
   FeatureSpec,
   InspectionFields,

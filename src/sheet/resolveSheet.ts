@@ -134,14 +134,13 @@ function rowOf(
   seen.add(spec.id);
   // worked out when all features that it may stand on are
   if ("keyseat" in spec) return Object.freeze({ ...base, ok: false as const, error: WAITING });
-  const resolved = attempt(() =>
-    atPath(["features", index, "callout"], () =>
-      resolveCallout(
-        spec.callout,
-        spec.kind === undefined ? sheet.callouts : { ...sheet.callouts, feature: spec.kind },
-      ),
-    ),
-  );
+  const { kind: feature, defaults } = spec;
+  const context: CalloutContext = {
+    ...sheet.callouts,
+    ...(feature === undefined ? {} : { feature }),
+    ...(defaults === undefined ? {} : { defaults }),
+  };
+  const resolved = attempt(() => atPath(["features", index, "callout"], () => resolveCallout(spec.callout, context)));
   // the finish all over is for sizes; an angle or a reference dimension has no surface of its own
   const sized = resolved.ok && (resolved.value.outcome === "limits" || resolved.value.outcome === "fit");
   const finishes = sized ? sheet.finishes : { ...sheet.finishes, allOver: null };

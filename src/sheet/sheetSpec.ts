@@ -1,4 +1,5 @@
 import type { DecisionRule } from "../limits/index.js";
+import type { DefaultProcess, SizeFeature } from "../titleBlock/index.js";
 
 /** What every feature of a drawing file has. */
 export interface FeatureBase {
@@ -24,8 +25,20 @@ export interface SizeFeatureSpec extends FeatureBase {
   readonly process?: string;
   /** What the surface is for, such as `"bearing seat"`. */
   readonly function?: string;
+  /** What a default tolerance can hang on besides the text. */
+  readonly defaults?: DefaultFields;
   /** What was measured, in the unit of the drawing unless it says its own; judged by the rule of `inspection`. */
   readonly measured?: string;
+}
+
+/** What a default tolerance can hang on besides the text, as a drawing file holds it. */
+export interface DefaultFields {
+  /** What the size belongs to, such as `"external radius or chamfer"` or `"wall thickness"`. */
+  readonly feature?: SizeFeature;
+  /** Length of the shorter leg of an angle, with its unit: standards go by it. */
+  readonly shorterLeg?: string;
+  /** How its surfaces came about: needed where the block has standards for more than one way. */
+  readonly process?: DefaultProcess;
 }
 
 /** A keyseat of a drawing, as a drawing file holds it. */

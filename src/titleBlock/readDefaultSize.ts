@@ -1,6 +1,5 @@
-import { hasOwn } from "../ownValue.js";
 import { LimitsError } from "../errors.js";
-import { ownValue } from "../ownValue.js";
+import { hasOwn, ownValue } from "../ownValue.js";
 import { readAngle, readDimension } from "../units/index.js";
 import type { AngleData, AngleLike, WrittenDimensionLike } from "../units/index.js";
 import type { OtherRequestLike, PlainAngleLike, PlainSizeLike } from "./defaultValue.js";
