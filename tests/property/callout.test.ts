@@ -139,3 +139,45 @@ describe("mutated texts", () => {
     expect(tried).toBeGreaterThan(100_000);
   });
 });
+
+describe("time", () => {
+  // as a ratio in one run: a reader that is worse than linear would need ten times as long a character, and more
+  const MOST = 8;
+  const ROUNDS = 7;
+  const pieces = [
+    "1 1/",
+    "1-1/4",
+    "+.1",
+    "±",
+    "(",
+    "[1/",
+    "45°",
+    "X",
+    "A",
+    "M8x",
+    "1/2-13 UN",
+    " ",
+    "\n",
+    "0/",
+    "µ",
+    "1.",
+  ];
+
+  function nsPerCharacter(texts: readonly string[]): number {
+    const characters = texts.reduce((sum, text) => sum + text.length, 0);
+    let best = Infinity;
+    for (let round = 0; round < ROUNDS; round++) {
+      const begin = performance.now();
+      for (let repeat = 0; repeat < 20; repeat++)
+        for (const text of texts) attempt(() => readCallout(text, { unit: "in" }));
+      best = Math.min(best, performance.now() - begin);
+    }
+    return (best * 1e6) / 20 / characters;
+  }
+
+  it("a character of a long text costs no more than a few times one of a short text", () => {
+    const ofLength = (length: number): string[] =>
+      pieces.map((piece) => piece.repeat(Math.ceil(length / piece.length)).slice(0, length));
+    expect(nsPerCharacter(ofLength(200)) / nsPerCharacter(ofLength(20))).toBeLessThan(MOST);
+  });
+});
