@@ -34,7 +34,7 @@ export const INCH_PRESETS: Readonly<Record<TitleBlockPresetName, Preset>> = {
       lengths: { decimals: { any: "±.015" }, fractions: "±.020" },
       angles: "±2°",
       edges: "fillets and corners .030 maximum",
-      finish: "not over 150 microinches",
+      finish: "finish not over 150 microinches",
     },
     marks: new Map([
       ["diameters.decimals.any", "1"],
