@@ -165,11 +165,11 @@ function withKeyseats(read: readonly ReadRow[], callouts: CalloutContext): reado
   for (const { row } of read) if (row.id !== null && !byId.has(row.id)) byId.set(row.id, row);
   return read.map(({ row, spec }) => {
     if (spec === null || !("keyseat" in spec) || row.ok || row.error !== WAITING) return row;
-    const { keyseat, id } = spec;
+    const { keyseat } = spec;
     const done = attempt(() =>
       atPath(["features", row.index, "keyseat"], () => resolveKeyseat(keyseat, byId, callouts)),
     );
-    const base = baseOf({ ...spec, id }, row.index);
+    const base = baseOf(spec, row.index);
     return done.ok
       ? Object.freeze({ ...base, ok: true as const, resolved: done.value, surface: null, judgement: null })
       : Object.freeze({ ...base, ok: false as const, error: done.error });
