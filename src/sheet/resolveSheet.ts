@@ -7,6 +7,7 @@ import { atPath } from "../located.js";
 import { titleBlock } from "../titleBlock/index.js";
 import { countSheet } from "./countSheet.js";
 import { ownCopy } from "./ownCopy.js";
+import { findingsOfCallout } from "./findingsOfCallout.js";
 import { findingsOfSurface } from "./findingsOfSurface.js";
 import { judgementOf } from "./judgementOf.js";
 import type { InspectionContext } from "./judgementOf.js";
@@ -178,7 +179,8 @@ function withKeyseats(read: readonly ReadRow[], callouts: CalloutContext): reado
 
 function findingsOfRow(row: SheetRow): readonly SheetFinding[] {
   if (!row.ok || row.id === null) return [];
-  return row.resolved.outcome === "keyseat" ? findingsOfKeyseat(row.id, row.resolved) : findingsOfSurface(row);
+  if (row.resolved.outcome === "keyseat") return findingsOfKeyseat(row.id, row.resolved);
+  return [...findingsOfCallout(row), ...findingsOfSurface(row)];
 }
 
 function baseOf(spec: FeatureSpec, index: number): SheetRowBase {

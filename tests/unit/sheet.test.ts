@@ -518,3 +518,52 @@ describe("readings", () => {
     }
   });
 });
+
+describe("what a callout says twice", () => {
+  const findings = (callout: string, unit: "mm" | "in" = "mm"): string[] =>
+    resolveSheet({
+      drawing: "d",
+      unit,
+      titleBlock: { decimals: { "1": "±.5", "2": "±.5", "3": "±.005" } },
+      features: [{ id: "A", callout }],
+    }).findings.map(({ code, says, found, expected }) => [code, says, found, expected].join(" | "));
+
+  it.each([
+    // ISO 286-2:2010: 35 k6 is +18/+2, 28 H7 is +21/0
+    "35 k6 (35.018/35.002)",
+    "35 k6 (+0.018/+0.002)",
+    "35 k6 (35.02/35.00)",
+    "28.5 [1.122]",
+    "28.50 [1.1220]",
+    "35 k6 [1.3787/1.3780]",
+    "35 k6 [1.3786/1.3781]",
+    "35.018/35.002 [1.3786/1.3781]",
+    "R0.5 MAX [.0196]",
+    "25.4 [1.0000000]",
+    "25.4 h6 (25.4000000/25.3870000)",
+  ])("clean: %s", (callout) => {
+    expect(findings(callout)).toEqual([]);
+  });
+
+  it("clean in inches too", () => {
+    expect([".500 [12.7]", ".500 [12.70]", "1.838/1.862 [46.69/47.29]"].flatMap((one) => findings(one, "in"))).toEqual(
+      [],
+    );
+  });
+
+  it("printed limits of another class, with the class that they are of", () => {
+    // 35 k5 is +13/+2
+    expect(findings("35 k5 (35.018/35.002)")).toEqual([
+      "PRINTED_LIMITS_NOT_OF_CLASS | the limits printed behind k5 are of k6 | 35.018 / 35.002 | 35.013 mm / 35.002 mm",
+    ]);
+    expect(findings("35 k6 (35.118/35.002)")[0]).toContain("of no ISO class");
+  });
+
+  it("a second unit that says something else", () => {
+    expect(findings(".500 [25.4]", "in")).toEqual([
+      "DUAL_DIMENSIONS_DISAGREE | the size in brackets is not the one before it in the other unit | 25.4 | 0.5 in",
+    ]);
+    expect(findings("35.018/35.002 [1.3790/1.3781]")[0]).toMatch(/^DUAL_DIMENSIONS_DISAGREE /);
+    expect(findings("28.5 [1 1/8]")[0]).toMatch(/^DUAL_DIMENSIONS_DISAGREE /);
+  });
+});
