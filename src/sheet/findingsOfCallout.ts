@@ -7,6 +7,7 @@ import type { Length, LengthUnit, Rounding, WrittenDimension } from "../units/in
 import { limitsOfRow } from "./readRow.js";
 import type { SheetFinding, SheetRow } from "./sheetValue.js";
 
+const MOST_PLACES: Readonly<Record<LengthUnit, number>> = { mm: 7, um: 4, in: 6, thou: 3, uin: 0 };
 const ROUNDINGS: readonly Rounding[] = ["nearest", "nearest-away", "up", "down"];
 
 /** Findings of a callout: printed limits that are not those of its class, a second unit that says something else. */
@@ -94,5 +95,5 @@ function agrees({ length, places, form }: WrittenDimension, exact: Length): bool
 
 /** Decimals that whole ticks can hold; a seventh of an inch is written, if ever, for show. */
 function placesIn(unit: LengthUnit, places: number): number {
-  return Math.min(places, unit === "in" ? 6 : 7);
+  return Math.min(places, MOST_PLACES[unit]);
 }
