@@ -7,7 +7,8 @@ import { readDeviations } from "./readDeviations.js";
 import type { BareRequest, ChamferRequest } from "./request.js";
 import type { TokenReader } from "./tokenReader.js";
 
-const FORTY_FIVE_DEGREES = 162_000_000_000;
+/** 45° in millionths of an arc second. */
+export const FORTY_FIVE_DEGREES = 162_000_000_000;
 
 /** True for `C0.5`, and for an angle before an X; a size before an X is seen only when it has been read. */
 export function startsChamfer(reader: TokenReader): boolean {

@@ -9,6 +9,7 @@ import { defaultLimits } from "../titleBlock/index.js";
 import type { DefaultLimitsOptions, SizeFeature, TitleBlock, TitleBlockSpec } from "../titleBlock/index.js";
 import type { Angle, WrittenDimension } from "../units/index.js";
 import { asRequest } from "./asRequest.js";
+import { FORTY_FIVE_DEGREES } from "./readChamfer.js";
 import { readCallout } from "./readCallout.js";
 import type { CalloutOptions } from "./readSize.js";
 import type { AngleRequest, CalloutRequest, ChamferRequest, PlainRequest } from "./request.js";
@@ -168,6 +169,12 @@ class Defaults {
     return this.#note(defaultLimits(this.#need(), angle, this.#options)).limits;
   }
 
+  /** Both legs of a chamfer of 45° are its length; of other angles the shorter one must be said. */
+  ofChamferAngle({ angle, length }: ChamferRequest): AngleLimits {
+    const legs = angle.microarcseconds === FORTY_FIVE_DEGREES ? { shorterLeg: length.length } : {};
+    return this.#note(defaultLimits(this.#need(), angle, { ...legs, ...this.#options })).limits;
+  }
+
   #note<Found extends { readonly cautions: readonly Caution[] }>(found: Found): Found {
     this.#cautions.push(...found.cautions);
     return found;
@@ -210,7 +217,7 @@ function resolve(request: CalloutRequest, feature: "hole" | "shaft" | undefined,
     case "angle":
       return { outcome: "angle", angle: angleOf(request, byBlock) };
     case "chamfer":
-      return { outcome: "chamfer", limits: chamferLength(request, byBlock), angle: byBlock.ofAngle(request.angle) };
+      return { outcome: "chamfer", limits: chamferLength(request, byBlock), angle: byBlock.ofChamferAngle(request) };
     case "reference":
       return { outcome: "no limits", reason: "a reference dimension is for information only" };
     case "basic":
