@@ -567,3 +567,62 @@ describe("what a callout says twice", () => {
     expect(findings("28.5 [1 1/8]")[0]).toMatch(/^DUAL_DIMENSIONS_DISAGREE /);
   });
 });
+
+describe("defaults that hang on more than the text", () => {
+  const rows = (titleBlock: object, features: readonly object[]): string[] =>
+    resolveSheet({
+      drawing: "d",
+      unit: "mm",
+      titleBlock,
+      features: features.map((feature, index) => ({ id: `${index}`, ...feature })),
+    }).rows.map((row) => {
+      if (!row.ok) return errorOf(row);
+      if (row.resolved.outcome === "limits") return row.resolved.limits.tolerance.toString();
+      if (row.resolved.outcome !== "chamfer") return row.resolved.outcome;
+      return `${row.resolved.limits.tolerance.toString()}, ${row.resolved.angle.max.toString()}`;
+    });
+
+  it("radii, chamfers and angles by ISO 2768-1", () => {
+    // class m: Table 1, over 6 to 30: ±0.2; Table 2, broken edges, over 0.5 to 3: ±0.2; Table 3, shorter leg up to 10:
+    // ±1°, over 10 to 50: ±0°30'
+    expect(
+      rows({ general: "ISO 2768-m" }, [
+        { callout: "28.5" },
+        { callout: "R2", defaults: { feature: "external radius or chamfer" } },
+        { callout: "R2", defaults: { feature: "internal radius" } },
+        { callout: "R2" },
+        { callout: "C1" },
+        { callout: "1 X 45°", defaults: { shorterLeg: "20 mm" } },
+        { callout: "1 X 30°" },
+      ]),
+    ).toEqual([
+      "0.4 mm",
+      "0.4 mm",
+      "0.2 mm",
+      "TITLE_BLOCK_OPTION_NEEDED features.3.callout",
+      "0.4 mm, 46°",
+      "0.4 mm, 45.5°",
+      "TITLE_BLOCK_OPTION_NEEDED features.6.callout",
+    ]);
+  });
+
+  it("lines for diameters and lengths, by the mark before the size", () => {
+    const block = { diameters: { decimals: { any: "±0.07" } }, lengths: { decimals: { any: "±0.3" } } };
+    expect(rows(block, [{ callout: "⌀28.5" }, { callout: "28.5" }, { callout: "28.5 DIA" }])).toEqual([
+      "0.14 mm",
+      "0.6 mm",
+      "0.14 mm",
+    ]);
+  });
+
+  it("castings, where the feature says so", () => {
+    // ISO 8062-3:2007, DCTG 8, over 25 to 40: 1.3 in all
+    const block = { general: "ISO 2768-m", castings: "DCTG 8" };
+    expect(
+      rows(block, [
+        { callout: "28.5", defaults: { process: "cast" } },
+        { callout: "28.5", defaults: { process: "machined" } },
+      ]),
+    ).toEqual(["1.3 mm", "0.4 mm"]);
+  });
+});
