@@ -11,7 +11,7 @@ const MOST_TICKS = 10_000_000_000;
 export const PARABOLA_RA: number = 1 / (18 * Math.sqrt(3));
 
 /** Rq of a row of parabolas in units of f²/r: 1 / (12 √5). */
-export const PARABOLA_RQ: number = 1 / (12 * Math.sqrt(5));
+const PARABOLA_RQ: number = 1 / (12 * Math.sqrt(5));
 
 /** The heights of a surface made of equal arcs of radius r, spaced f apart. */
 export interface ArcRoughness {

@@ -52,7 +52,7 @@ export function processesForGrade(grade: ToleranceGradeLike): ProcessesForGrade 
 }
 
 /** How one line stands to a grade. */
-export function gradeReachOf(span: GradeSpan, grade: number): GradeReach {
+function gradeReachOf(span: GradeSpan, grade: number): GradeReach {
   if (grade < span.finest) return "not usual";
   return grade > span.coarsest ? "finer than needed" : "usual";
 }

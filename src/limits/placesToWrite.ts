@@ -10,7 +10,7 @@ export function placesToWrite(limits: Limits, unit: LengthUnit): number {
     const places = exactPlaces(size, unit);
     if (places === null) {
       throw new LimitsError("LENGTH_NOT_EXACT", "these limits do not end in decimals of that unit", {
-        value: `${size.toString()} in ${unit}`,
+        value: `${size.toString()}, to be written in ${unit}`,
         allowed: "say how many places; they are rounded inside unless said otherwise",
       });
     }

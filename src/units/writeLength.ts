@@ -83,7 +83,7 @@ function placesOf(value: Length, unit: LengthUnit, asked: number | undefined): n
   const exact = exactPlaces(value, unit);
   if (exact === null) {
     throw new LimitsError("LENGTH_NOT_EXACT", "this length does not end in decimals of that unit", {
-      value: `${value.toString()} in ${unitSymbol(unit)}`,
+      value: `${value.toString()}, to be written in ${unitSymbol(unit)}`,
       allowed: "say how many places, and how to round",
     });
   }

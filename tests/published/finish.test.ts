@@ -41,6 +41,7 @@ import type {
 } from "limitsmith";
 import { describe, expect, it } from "vitest";
 import { codeOf } from "../support/thrown.js";
+import { expectWhole } from "./expectWhole.js";
 import { readCases } from "./readCases.js";
 
 // The cases are copies of what published tables say; nothing in them was made by this library.
@@ -156,12 +157,7 @@ describe("the files", () => {
     ["theoretical.json", theoretical, 4],
     ["tolerance-rules.json", rules, 6],
   ] as const)("%s is whole and says where it comes from", (_, file, count) => {
-    expect(file.cases).toHaveLength(count);
-    expect(file.version).toBe(1);
-    for (const name of ["title", "standard", "edition", "table"] as const) expect(file[name]).not.toBe("");
-    for (const { source } of file.cases) {
-      if (Array.isArray(source)) for (const id of source as string[]) expect(file.sources).toHaveProperty(id);
-    }
+    expectWhole(file, count);
   });
 });
 

@@ -5,6 +5,7 @@ import { inch, lengthOfTicks } from "limitsmith/units";
 import type { Length } from "limitsmith/units";
 import { describe, expect, it } from "vitest";
 import { thrown } from "../support/thrown.js";
+import { expectWhole } from "./expectWhole.js";
 import { readCases } from "./readCases.js";
 
 // The cases are copies of what published tables say; nothing in them was made by this library.
@@ -124,12 +125,7 @@ describe("the files", () => {
     ["preferred-sizes.json", sizes, 140],
     ["preferred-tolerances.json", series, 51],
   ] as const)("%s is whole and says where it comes from", (_, file, count) => {
-    expect(file.cases).toHaveLength(count);
-    expect(file.version).toBe(1);
-    for (const name of ["title", "standard", "edition", "table"] as const) expect(file[name]).not.toBe("");
-    for (const { source } of file.cases) {
-      if (Array.isArray(source)) for (const id of source as string[]) expect(file.sources).toHaveProperty(id);
-    }
+    expectWhole(file, count);
   });
 
   it("cover each class from 0 to 19.69 in, and each grade from 0 to 200 in, without gap or overlap", () => {

@@ -12,6 +12,7 @@ import {
 import type { BasisStep, GradeName, IsoOptions, Length, Limits } from "limitsmith";
 import { describe, expect, it } from "vitest";
 import { codeOf } from "../support/thrown.js";
+import { expectWhole } from "./expectWhole.js";
 import { readCases } from "./readCases.js";
 
 // The cases are copies of what published tables say; nothing in them was made by this library.
@@ -146,12 +147,7 @@ describe("the files", () => {
     ["preferred-fits.json", preferredFits, 83],
     ["preferred-fits-ansi.json", namedFits, 10],
   ] as const)("%s is whole and says where it comes from", (_, file, count) => {
-    expect(file.cases).toHaveLength(count);
-    expect(file.version).toBe(1);
-    for (const name of ["title", "standard", "edition", "table"] as const) expect(file[name]).not.toBe("");
-    for (const { source } of file.cases) {
-      if (Array.isArray(source)) for (const id of source as string[]) expect(file.sources).toHaveProperty(id);
-    }
+    expectWhole(file, count);
   });
 
   it("cover each letter, grade and step", () => {
